@@ -7,13 +7,27 @@ import tseslint from 'typescript-eslint';
 
 /** The arrows of the architecture: src → shared ← server; shared imports generated types and itself, nothing else. */
 const forbid = (...patterns) => ({
-  '@typescript-eslint/no-restricted-imports': ['error', { patterns: patterns.map(p => ({ regex: p[0], message: p[1] })) }],
+  '@typescript-eslint/no-restricted-imports': [
+    'error',
+    { patterns: patterns.map(p => ({ regex: p[0], message: p[1] })) },
+  ],
 });
 
-const impure = name => ({ name, message: 'shared/ is pure: no clock, no randomness, no host. Pass the value in.' });
+const impure = name => ({
+  name,
+  message: 'shared/ is pure: no clock, no randomness, no host. Pass the value in.',
+});
 
 export default defineConfig(
-  globalIgnores(['dist/', '.angular/', '.data/', 'coverage/', 'test-results/', 'schemas/generated/', 'node_modules/']),
+  globalIgnores([
+    'dist/',
+    '.angular/',
+    '.data/',
+    'coverage/',
+    'test-results/',
+    'schemas/generated/',
+    'node_modules/',
+  ]),
   js.configs.recommended,
   {
     files: ['**/*.ts'],
@@ -33,11 +47,20 @@ export default defineConfig(
     files: ['shared/**/*.ts'],
     rules: {
       ...forbid(
-        ['^(node:|@angular|three|express|knex|pg|rxjs)', 'shared/ is pure TypeScript: no framework, no Node.'],
+        [
+          '^(node:|@angular|three|express|knex|pg|rxjs)',
+          'shared/ is pure TypeScript: no framework, no Node.',
+        ],
         ['(^|/)(src|server)/', 'shared/ never imports from the client or the server.'],
       ),
-      'no-restricted-globals': ['error', ...['window', 'document', 'process', 'Date', 'performance', 'fetch', 'Buffer'].map(impure)],
-      'no-restricted-properties': ['error', { object: 'Math', property: 'random', message: 'shared/ is pure: pass randomness in.' }],
+      'no-restricted-globals': [
+        'error',
+        ...['window', 'document', 'process', 'Date', 'performance', 'fetch', 'Buffer'].map(impure),
+      ],
+      'no-restricted-properties': [
+        'error',
+        { object: 'Math', property: 'random', message: 'shared/ is pure: pass randomness in.' },
+      ],
     },
   },
   {
@@ -45,21 +68,35 @@ export default defineConfig(
     extends: [angular.configs.tsRecommended],
     processor: angular.processInlineTemplates,
     rules: {
-      ...forbid(['(^|/)server/', 'The client never imports from the server.'], ['^node:', 'No Node in the browser.']),
+      ...forbid(
+        ['(^|/)server/', 'The client never imports from the server.'],
+        ['^node:', 'No Node in the browser.'],
+      ),
       '@angular-eslint/component-selector': ['error', { type: 'element', prefix: 'fl', style: 'kebab-case' }],
-      '@angular-eslint/directive-selector': ['error', { type: 'attribute', prefix: 'fl', style: 'camelCase' }],
+      '@angular-eslint/directive-selector': [
+        'error',
+        { type: 'attribute', prefix: 'fl', style: 'camelCase' },
+      ],
     },
   },
   {
     files: ['src/app/designer/state/**/*.ts'],
-    rules: forbid(['^@angular', 'Editor state knows no framework (STYLE: editor state).'], ['(^|/)server/', 'The client never imports from the server.']),
+    rules: forbid(
+      ['^@angular', 'Editor state knows no framework (STYLE: editor state).'],
+      ['(^|/)server/', 'The client never imports from the server.'],
+    ),
   },
   {
     files: ['src/**/*.html'],
     extends: [angular.configs.templateRecommended, angular.configs.templateAccessibility],
-    rules: { '@angular-eslint/template/no-inline-styles': ['error', { allowNgStyle: true, allowBindToStyle: true }] },
+    rules: {
+      '@angular-eslint/template/no-inline-styles': ['error', { allowNgStyle: true, allowBindToStyle: true }],
+    },
   },
-  { files: ['server/**/*.ts', 'migrations/**/*.ts', 'seeds/**/*.ts'], rules: forbid(['(^|/)src/', 'The server never imports from the client.']) },
+  {
+    files: ['server/**/*.ts', 'migrations/**/*.ts', 'seeds/**/*.ts'],
+    rules: forbid(['(^|/)src/', 'The server never imports from the client.']),
+  },
   {
     files: ['test/**/*.ts', 'src/**/*.test.ts'],
     rules: {

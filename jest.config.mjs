@@ -4,7 +4,16 @@ const moduleFileExtensions = ['ts', 'js', 'mjs', 'json'];
 const typescript = { '^.+\\.ts$': ['ts-jest', { tsconfig: 'tsconfig.spec.json' }] };
 
 /** Packages published as ES modules only: Jest runs CommonJS, so these are transformed too. */
-const esmPackages = ['d3-geo', 'd3-geo-projection', 'd3-array', 'internmap', 'fast-check', 'pure-rand', 'three', 'csv-parse'];
+const esmPackages = [
+  'd3-geo',
+  'd3-geo-projection',
+  'd3-array',
+  'internmap',
+  'fast-check',
+  'pure-rand',
+  'three',
+  'csv-parse',
+];
 const transformIgnorePatterns = [`/node_modules/(?!(?:${esmPackages.join('|')})/|.*\\.mjs$)`];
 const threeModule = { '^three$': '<rootDir>/node_modules/three/build/three.module.js' };
 
