@@ -30,7 +30,7 @@ var require_ucs2length = __commonJS({
 });
 
 // <stdin>
-var validate = validate20, stdin_default = validate20;
+var machineMade = validate20;
 var func1 = require_ucs2length().default, schema34 = { title: "Shot", description: "What the move needs to know of the shot that it travels through.", type: "object", additionalProperties: !1, required: ["title", "rate", "frames", "speed", "source"], properties: { title: { $ref: "#/$defs/title" }, rate: { $ref: "#/$defs/rate" }, frames: { description: "Source frames in the shot.", type: "integer", minimum: 1, maximum: 1e7 }, speed: { description: "How many times faster the delivered film runs than the source.", type: "number", minimum: 0.01, maximum: 1e4 }, from: { description: "First delivered source frame; the shot's first unless said.", $ref: "#/$defs/frame" }, to: { description: "Last delivered source frame, included; the shot's last unless said.", $ref: "#/$defs/frame" }, start: { description: "Timecode of source frame 0, SMPTE ST 12-1; 00:00:00:00 unless said.", type: "string", pattern: "^\\d\\d:[0-5]\\d:[0-5]\\d[:;]\\d{2,4}$" }, dropFrame: { description: "Drop-frame counting, only at 30000/1001 and 60000/1001; false unless said.", type: "boolean" }, source: { $ref: "#/$defs/source" }, level: { description: "Unit quaternion x, y, z, w from source directions to the levelled world; none unless said.", type: "array", minItems: 4, maxItems: 4, items: { type: "number", minimum: -1, maximum: 1 } }, seamYaw: { description: "Heading of the stitch seam's great circle in source directions, degrees.", type: "number", minimum: -36e3, maximum: 36e3 }, loops: { description: "Whether the shot's end joins its beginning; false unless said.", type: "boolean" }, exposure: { description: "Seconds of one exposure.", type: "number", exclusiveMinimum: 0, maximum: 86400 }, interval: { description: "Real seconds from one source frame to the next; one over the rate unless said.", type: "number", exclusiveMinimum: 0, maximum: 86400 }, extensions: { $ref: "#/$defs/extensions" } } };
 var func3 = Object.prototype.hasOwnProperty, pattern4 = new RegExp("^\\d\\d:[0-5]\\d:[0-5]\\d[:;]\\d{2,4}$", "u");
 function validate22(data, { instancePath = "", parentData, parentDataProperty, rootData = data, dynamicAnchors = {} } = {}) {
@@ -825,4 +825,4 @@ function validate20(data, { instancePath = "", parentData, parentDataProperty, r
 }
 validate20.evaluated = { props: !0, dynamicProps: !1, dynamicItems: !1 };
 
-export const validate: SchemaValidator<MoveDocument> = stdin_default as SchemaValidator<MoveDocument>;
+export const validate: SchemaValidator<MoveDocument> = machineMade as SchemaValidator<MoveDocument>;

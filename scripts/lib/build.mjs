@@ -1,4 +1,5 @@
 import { existsSync } from 'node:fs';
+import path from 'node:path';
 
 import { inProject } from './project.mjs';
 import { mustRun } from './run.mjs';
@@ -45,12 +46,15 @@ export async function buildServer() {
 /**
  * Bundles TypeScript entry files for Node, packages left outside.
  *
- * @param entries paths below the project; each becomes `<outdir>/<name>.mjs`
+ * @param entries paths below the project, each becoming `<outdir>/<name>.mjs`, or `{ in, out }` with a name of its own
  */
 export async function bundle(entries, outdir, options = {}) {
   const { build } = await import('esbuild');
   await build({
-    entryPoints: entries.map(entry => inProject(entry)).filter(existsSync),
+    entryPoints: entries
+      .map(entry => (typeof entry === 'string' ? { in: entry, out: path.basename(entry, '.ts') } : entry))
+      .map(entry => ({ ...entry, in: inProject(entry.in) }))
+      .filter(entry => existsSync(entry.in)),
     outdir: inProject(outdir),
     bundle: true,
     platform: 'node',

@@ -9,7 +9,9 @@ import path from 'node:path';
  */
 export async function standaloneValidator(file, schemas) {
   const { Ajv2020 } = await import('ajv/dist/2020.js');
-  const { default: standaloneCode } = await import('ajv/dist/standalone/index.js');
+  const { default: standalone } = await import('ajv/dist/standalone/index.js');
+  // A CommonJS package: depending on the loader its default stands one level deeper.
+  const standaloneCode = standalone.default ?? standalone;
   const ajv = new Ajv2020({
     allErrors: true,
     verbose: false,
@@ -18,10 +20,7 @@ export async function standaloneValidator(file, schemas) {
     schemas: [...schemas.values()],
   });
   const { $id, title } = schemas.get(file);
-  const validate = ajv.getSchema($id);
-  const code = await selfContained(
-    standaloneCode.default ? standaloneCode.default(ajv, validate) : standaloneCode(ajv, validate),
-  );
+  const code = await selfContained(standaloneCode(ajv, { machineMade: $id }));
   return `/* eslint-disable */
 // @ts-nocheck: machine-made code; its type is stated at the end.
 import { type SchemaValidator } from '${'../'.repeat(file.split('/').length - 1) || './'}schema-validator';
@@ -32,8 +31,10 @@ export const validate: SchemaValidator<${title}> = ${exportedName(code)} as Sche
 `;
 }
 
+/** esbuild ends its output with `export { name as machineMade };` */
 function exportedName(code) {
-  return /export\s*\{\s*(?:[\w$]+ as validate,\s*)?([\w$]+) as default/.exec(code)?.[1] ?? 'validate';
+  const [, name] = /export\s*\{\s*(?:([\w$]+) as )?machineMade\s*\}/.exec(code) ?? [];
+  return name ?? 'machineMade';
 }
 
 /** Ajv emits `require` for its helpers (`minLength` counts code points): esbuild folds them in. */

@@ -1,0 +1,51 @@
+/** Bad input: told in one line on standard error; exit code 2. */
+export class UsageError extends Error {}
+
+/** A verb's words: its file and its options. */
+export interface Words {
+  readonly file: string;
+  readonly options: ReadonlyMap<string, string>;
+}
+
+/**
+ * Reads `FILE [--option value]…`.
+ *
+ * @param args what follows the verb
+ * @param known names of the options that the verb takes, each with a value
+ * @throws UsageError
+ */
+export function readWords(args: readonly string[], known: readonly string[]): Words {
+  const files: string[] = [];
+  const options = new Map<string, string>();
+  for (let i = 0; i < args.length; i++) {
+    const word = args[i];
+    if (!word.startsWith('--')) {
+      files.push(word);
+      continue;
+    }
+    const [name, inline] = word.slice(2).split(/=(.*)/s);
+    if (!known.includes(name)) throw new UsageError(`${word} is not an option of this verb${listed(known)}.`);
+    const value = inline ?? args[++i];
+    if (value === undefined) throw new UsageError(`--${name} wants a value.`);
+    options.set(name, value);
+  }
+  if (files.length !== 1)
+    throw new UsageError(`Name one FILE (or - for standard input), not ${files.length}.`);
+  return { file: files[0], options };
+}
+
+function listed(known: readonly string[]): string {
+  return known.length > 0 ? `; it takes ${known.map(name => `--${name}`).join(', ')}` : '';
+}
+
+/**
+ * @param allowed the values that an option may have, the default first
+ * @throws UsageError
+ */
+export function choice<T extends string>(words: Words, name: string, allowed: readonly [T, ...T[]]): T {
+  const given = words.options.get(name) ?? allowed[0];
+  const found = allowed.find(value => value === given);
+  if (found === undefined)
+    throw new UsageError(`--${name} is one of ${allowed.join(', ')}, not ${JSON.stringify(given)}.`);
+  return found;
+}
