@@ -1,4 +1,4 @@
-import { createCjsPreset } from 'jest-preset-angular/presets/index.js';
+import presets from 'jest-preset-angular/presets/index.js';
 
 const moduleFileExtensions = ['ts', 'js', 'mjs', 'json'];
 const typescript = { '^.+\\.ts$': ['ts-jest', { tsconfig: 'tsconfig.spec.json' }] };
@@ -33,7 +33,7 @@ export default {
     node('shared'),
     node('server'),
     {
-      ...createCjsPreset({
+      ...presets.createCjsPreset({
         tsconfig: '<rootDir>/tsconfig.spec.json',
         processWithEsbuild: ['**/node_modules/three/**/*.js'],
       }),
