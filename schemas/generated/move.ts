@@ -41,76 +41,12 @@ export interface MoveDocument {
   shot: Shot;
   /**
    * What the move is delivered as; the first is the one that the keys were made for.
-   *
-   * @minItems 1
-   * @maxItems 12
    */
-  deliverables:
-    | [Deliverable]
-    | [Deliverable, Deliverable]
-    | [Deliverable, Deliverable, Deliverable]
-    | [Deliverable, Deliverable, Deliverable, Deliverable]
-    | [Deliverable, Deliverable, Deliverable, Deliverable, Deliverable]
-    | [Deliverable, Deliverable, Deliverable, Deliverable, Deliverable, Deliverable]
-    | [Deliverable, Deliverable, Deliverable, Deliverable, Deliverable, Deliverable, Deliverable]
-    | [Deliverable, Deliverable, Deliverable, Deliverable, Deliverable, Deliverable, Deliverable, Deliverable]
-    | [
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable
-      ]
-    | [
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable
-      ]
-    | [
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable
-      ]
-    | [
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable,
-        Deliverable
-      ];
+  deliverables: Deliverable[];
   /**
    * The keys, at rising whole source frames.
-   *
-   * @minItems 1
-   * @maxItems 2000
    */
-  keys: [Key, ...Key[]];
+  keys: Key[];
   extensions?: Extensions;
 }
 /**

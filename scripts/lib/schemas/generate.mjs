@@ -13,8 +13,8 @@ export function schemaFiles() {
     .sort();
 }
 
-export function readSchema(file) {
-  return JSON.parse(readFileSync(inProject('schemas', file), 'utf8'));
+export function readSchema(file, reviver) {
+  return JSON.parse(readFileSync(inProject('schemas', file), 'utf8'), reviver);
 }
 
 /**
@@ -37,7 +37,7 @@ export async function generated() {
 /** json-schema-to-typescript 16 reads draft 2020-12 but for `prefixItems`, which our schemas do without. */
 async function typesOf(file) {
   const { compile } = await import('json-schema-to-typescript');
-  const schema = readSchema(file);
+  const schema = readSchema(file, (_name, value) => (isOpenList(value) ? withoutBounds(value) : value));
   return compile(schema, schema.title, {
     cwd: path.dirname(inProject('schemas', file)),
     additionalProperties: false,
@@ -45,4 +45,13 @@ async function typesOf(file) {
     format: true,
     style: { singleQuote: true, printWidth: 110 },
   });
+}
+
+/** A list whose length may vary: its bounds would become a union of tuples, which no code could build. */
+function isOpenList(value) {
+  return value?.type === 'array' && value.minItems !== value.maxItems;
+}
+
+function withoutBounds({ minItems: _min, maxItems: _max, ...schema }) {
+  return schema;
 }
