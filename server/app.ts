@@ -1,7 +1,6 @@
 import compression from 'compression';
 import express, { type Express } from 'express';
 import { type Knex } from 'knex';
-import path from 'node:path';
 import pg from 'pg';
 import { type Logger } from 'pino';
 import { Authentication } from './accounts/authentication';
@@ -24,7 +23,7 @@ import { plateRoutes } from './plates/plate-routes';
 import { PictureReceiver } from './plates/receive-picture';
 import { shootRoutes } from './shoots/shoot-routes';
 import { shotRoutes } from './shots/shot-routes';
-import { LocalStorage } from './storage/local-storage';
+import { LocalStorage, objectsFolder } from './storage/local-storage';
 import { type ObjectStorage } from './storage/object-storage';
 
 /** What a test may bring instead of the usual. */
@@ -63,7 +62,7 @@ export function createApp(config: Config, log: Logger, parts: Parts = {}): App {
   const receiver = new PictureReceiver(config.storageDir);
   const tools = {
     reader: new PictureReader(config.pictureWorker),
-    storage: parts.storage ?? new LocalStorage(path.join(config.storageDir, 'objects')),
+    storage: parts.storage ?? new LocalStorage(objectsFolder(config.storageDir)),
   };
   const featureRoutes: Route[] = [
     ...sessionRoutes({ db, authentication, limits, guard, sessionCookie: sessions.cookieName }),

@@ -1,6 +1,7 @@
 import { type Server } from 'node:http';
 import { createApp } from './app';
 import { readConfig } from './config';
+import { codeOf } from './error-parts';
 import { openLog } from './http/request-log';
 
 /** What a start script reads as "that port is taken". */
@@ -42,7 +43,7 @@ async function stop(listening: Server, reason: string): Promise<void> {
 }
 
 function fail(error: Error): void {
-  const taken = 'code' in error && error.code === 'EADDRINUSE';
+  const taken = codeOf(error) === 'EADDRINUSE';
   console.error(taken ? `Port ${config.port} is taken by another program.` : error.message);
   process.exit(taken ? PORT_TAKEN : 1);
 }

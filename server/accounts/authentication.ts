@@ -2,6 +2,7 @@ import { type Request, type RequestHandler, type Response } from 'express';
 import { type Knex } from 'knex';
 import passport from 'passport';
 import { Strategy } from 'passport-local';
+import { asError } from '../error-parts';
 import { type Account, findAccount, findAccountByEmail } from './accounts-db';
 import type {} from './express-user';
 import { passwordMatches } from './passwords';
@@ -41,7 +42,7 @@ export class Authentication {
   checkPassword(req: Request, res: Response): Promise<Account | undefined> {
     return new Promise((resolve, reject) => {
       const check: unknown = this.#passport.authenticate('local', (error: unknown, user: Account | false) => {
-        if (error) reject(error instanceof Error ? error : new Error('Signing in failed'));
+        if (error) reject(asError(error));
         else resolve(user || undefined);
       });
       if (isMiddleware(check)) void check(req, res, reject);
@@ -53,7 +54,7 @@ export class Authentication {
   signIn(req: Request, account: Account): Promise<void> {
     return new Promise((resolve, reject) => {
       req.logIn(account, (error: unknown) => {
-        if (error) reject(error instanceof Error ? error : new Error('Signing in failed'));
+        if (error) reject(asError(error));
         else resolve();
       });
     });
@@ -63,7 +64,7 @@ export class Authentication {
   signOut(req: Request): Promise<void> {
     return new Promise((resolve, reject) => {
       req.session.destroy((error: unknown) => {
-        if (error) reject(error instanceof Error ? error : new Error('Signing out failed'));
+        if (error) reject(asError(error));
         else resolve();
       });
     });

@@ -6,7 +6,7 @@ export const MOST_JSON_BYTES = 2 * 1024 * 1024;
 
 /** @returns the problem with a request's body that Express' own reader found, or undefined for another error */
 export function bodyProblem(error: unknown): Problem | undefined {
-  if (!(error instanceof Error) || !('type' in error)) return undefined;
+  if (typeof error !== 'object' || error === null || !('type' in error)) return undefined;
   switch (error.type) {
     case 'entity.too.large':
       return new Problem(

@@ -1,5 +1,6 @@
 import { type ErrorRequestHandler } from 'express';
 import { databaseFailure, type DatabaseFailure } from '../db/failures';
+import { codeOf } from '../error-parts';
 import { bodyProblem } from './body-problem';
 import { Problem } from './problem';
 
@@ -65,7 +66,7 @@ export const errorHandler: ErrorRequestHandler = (error: unknown, req, res, _nex
 
 function toProblem(error: unknown): Problem {
   if (error instanceof Problem) return error;
-  if (error instanceof Error && 'code' in error && error.code === 'ENOSPC') return diskFull();
+  if (codeOf(error) === 'ENOSPC') return diskFull();
   const failure = databaseFailure(error);
   if (failure) return DATABASE_PROBLEMS[failure]();
   return bodyProblem(error) ?? unforeseen();

@@ -1,6 +1,7 @@
 import { type Response } from 'express';
 import { Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
+import { serialiseMove } from '#shared/document/serialise';
 import { framesCsv } from '#shared/export/csv';
 import { frameRows, type Per } from '#shared/export/frames-table';
 import { revisionOf } from '../http/if-match';
@@ -83,7 +84,7 @@ export function moveRoutes(): CrewRoute[] {
       async ({ scope, req, res }) => {
         const { document } = await seeMove(scope, pathValue(req, 'moveId'));
         await send(res, `${safeFileName(document.title)}.move.json`, 'application/json', [
-          `${JSON.stringify(document, null, 2)}\n`,
+          serialiseMove(document),
         ]);
         return undefined;
       },

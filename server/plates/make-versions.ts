@@ -3,6 +3,7 @@ import { readFile } from 'node:fs/promises';
 import path from 'node:path';
 import sharp, { type Metadata, type OutputInfo, type Sharp } from 'sharp';
 import { type PlateVersionName } from '#schemas/api/plates';
+import { messageOf } from '../error-parts';
 import { panoramaClaim, type PanoramaClaim } from './panorama-claim';
 import {
   type MadeVersion,
@@ -165,7 +166,7 @@ async function write(pixels: Pixels, name: PlateVersionName, folder: string): Pr
 
 /** A picture that does not decode is the picture's fault; a disk without room is not. */
 function reportOf(error: unknown): PictureReport {
-  const words = error instanceof Error ? error.message : String(error);
+  const words = messageOf(error);
   if (/no space left|ENOSPC/i.test(words)) return { failed: words, code: 'ENOSPC' };
   if (/timeout/i.test(words))
     return {

@@ -74,7 +74,7 @@ const requireMultipart: RequestHandler = (req, _res, next) => {
 /** The disk's own errors stay what they are; anything else is a body that is no multipart body. */
 function readingProblem(error: unknown): unknown {
   if (error instanceof MulterError) return uploadProblem(error);
-  if (error instanceof Error && 'syscall' in error) return error;
+  if (typeof error === 'object' && error !== null && 'syscall' in error) return error;
   return new Problem(
     400,
     'malformed-upload',

@@ -1,10 +1,14 @@
 import { randomUUID } from 'node:crypto';
 import { copyFile, link, mkdir, open, rm } from 'node:fs/promises';
 import path from 'node:path';
+import { codeOf } from '../error-parts';
 import { type ObjectStorage } from './object-storage';
 
 /** Lowercase words with slashes between; nothing that climbs out of the folder. */
 const KEY = /^[a-z0-9]+(?:[/-][a-z0-9]+)*\.[a-z0-9]+$/;
+
+/** @returns where a process' storage folder keeps its objects */
+export const objectsFolder = (storageDir: string) => path.join(storageDir, 'objects');
 
 /** Objects as files below one folder. */
 export class LocalStorage implements ObjectStorage {
@@ -20,7 +24,7 @@ export class LocalStorage implements ObjectStorage {
       await link(beside, place);
       return true;
     } catch (error) {
-      if (error instanceof Error && 'code' in error && error.code === 'EEXIST') return false;
+      if (codeOf(error) === 'EEXIST') return false;
       throw error;
     } finally {
       await rm(beside, { force: true });
@@ -33,7 +37,7 @@ export class LocalStorage implements ObjectStorage {
       const { size } = await file.stat();
       return { bytes: size, stream: file.createReadStream() };
     } catch (error) {
-      if (error instanceof Error && 'code' in error && error.code === 'ENOENT') return undefined;
+      if (codeOf(error) === 'ENOENT') return undefined;
       throw error;
     }
   }

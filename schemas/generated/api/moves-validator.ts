@@ -348,58 +348,54 @@ function validate20(data, { instancePath = "", parentData, parentDataProperty, r
               let err7 = { instancePath: instancePath + "/moveDraft/title", schemaPath: "#/$defs/MoveDraft/anyOf/1/properties/title/maxLength", keyword: "maxLength", params: { limit: 200 }, message: "must NOT have more than 200 characters" };
               vErrors === null ? vErrors = [err7] : vErrors.push(err7), errors++;
             }
-            if (func2(data4) < 1) {
-              let err8 = { instancePath: instancePath + "/moveDraft/title", schemaPath: "#/$defs/MoveDraft/anyOf/1/properties/title/minLength", keyword: "minLength", params: { limit: 1 }, message: "must NOT have fewer than 1 characters" };
+            if (!pattern4.test(data4)) {
+              let err8 = { instancePath: instancePath + "/moveDraft/title", schemaPath: "#/$defs/MoveDraft/anyOf/1/properties/title/pattern", keyword: "pattern", params: { pattern: "\\S" }, message: 'must match pattern "\\S"' };
               vErrors === null ? vErrors = [err8] : vErrors.push(err8), errors++;
             }
-            if (!pattern4.test(data4)) {
-              let err9 = { instancePath: instancePath + "/moveDraft/title", schemaPath: "#/$defs/MoveDraft/anyOf/1/properties/title/pattern", keyword: "pattern", params: { pattern: "\\S" }, message: 'must match pattern "\\S"' };
-              vErrors === null ? vErrors = [err9] : vErrors.push(err9), errors++;
-            }
           } else {
-            let err10 = { instancePath: instancePath + "/moveDraft/title", schemaPath: "#/$defs/MoveDraft/anyOf/1/properties/title/type", keyword: "type", params: { type: "string" }, message: "must be string" };
-            vErrors === null ? vErrors = [err10] : vErrors.push(err10), errors++;
+            let err9 = { instancePath: instancePath + "/moveDraft/title", schemaPath: "#/$defs/MoveDraft/anyOf/1/properties/title/type", keyword: "type", params: { type: "string" }, message: "must be string" };
+            vErrors === null ? vErrors = [err9] : vErrors.push(err9), errors++;
           }
         }
       } else {
-        let err11 = { instancePath: instancePath + "/moveDraft", schemaPath: "#/$defs/MoveDraft/anyOf/1/type", keyword: "type", params: { type: "object" }, message: "must be object" };
-        vErrors === null ? vErrors = [err11] : vErrors.push(err11), errors++;
+        let err10 = { instancePath: instancePath + "/moveDraft", schemaPath: "#/$defs/MoveDraft/anyOf/1/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        vErrors === null ? vErrors = [err10] : vErrors.push(err10), errors++;
       }
       var _valid0 = _errs12 === errors;
       if (valid2 = valid2 || _valid0, _valid0 && props0 !== !0 && (props0 = !0), valid2)
         errors = _errs6, vErrors !== null && (_errs6 ? vErrors.length = _errs6 : vErrors = null);
       else {
-        let err12 = { instancePath: instancePath + "/moveDraft", schemaPath: "#/$defs/MoveDraft/anyOf", keyword: "anyOf", params: {}, message: "must match a schema in anyOf" };
-        vErrors === null ? vErrors = [err12] : vErrors.push(err12), errors++;
+        let err11 = { instancePath: instancePath + "/moveDraft", schemaPath: "#/$defs/MoveDraft/anyOf", keyword: "anyOf", params: {}, message: "must match a schema in anyOf" };
+        vErrors === null ? vErrors = [err11] : vErrors.push(err11), errors++;
       }
     }
     if (data.moveSave !== void 0) {
       let data5 = data.moveSave;
       if (data5 && typeof data5 == "object" && !Array.isArray(data5)) {
         if (data5.document === void 0) {
-          let err13 = { instancePath: instancePath + "/moveSave", schemaPath: "#/$defs/MoveSave/required", keyword: "required", params: { missingProperty: "document" }, message: "must have required property 'document'" };
-          vErrors === null ? vErrors = [err13] : vErrors.push(err13), errors++;
+          let err12 = { instancePath: instancePath + "/moveSave", schemaPath: "#/$defs/MoveSave/required", keyword: "required", params: { missingProperty: "document" }, message: "must have required property 'document'" };
+          vErrors === null ? vErrors = [err12] : vErrors.push(err12), errors++;
         }
         for (let key3 in data5)
           if (key3 !== "document") {
-            let err14 = { instancePath: instancePath + "/moveSave", schemaPath: "#/$defs/MoveSave/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key3 }, message: "must NOT have additional properties" };
-            vErrors === null ? vErrors = [err14] : vErrors.push(err14), errors++;
+            let err13 = { instancePath: instancePath + "/moveSave", schemaPath: "#/$defs/MoveSave/additionalProperties", keyword: "additionalProperties", params: { additionalProperty: key3 }, message: "must NOT have additional properties" };
+            vErrors === null ? vErrors = [err13] : vErrors.push(err13), errors++;
           }
         if (data5.document !== void 0) {
           let data6 = data5.document;
           if (!(data6 && typeof data6 == "object" && !Array.isArray(data6))) {
-            let err15 = { instancePath: instancePath + "/moveSave/document", schemaPath: "#/$defs/MoveSave/properties/document/type", keyword: "type", params: { type: "object" }, message: "must be object" };
-            vErrors === null ? vErrors = [err15] : vErrors.push(err15), errors++;
+            let err14 = { instancePath: instancePath + "/moveSave/document", schemaPath: "#/$defs/MoveSave/properties/document/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+            vErrors === null ? vErrors = [err14] : vErrors.push(err14), errors++;
           }
         }
       } else {
-        let err16 = { instancePath: instancePath + "/moveSave", schemaPath: "#/$defs/MoveSave/type", keyword: "type", params: { type: "object" }, message: "must be object" };
-        vErrors === null ? vErrors = [err16] : vErrors.push(err16), errors++;
+        let err15 = { instancePath: instancePath + "/moveSave", schemaPath: "#/$defs/MoveSave/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+        vErrors === null ? vErrors = [err15] : vErrors.push(err15), errors++;
       }
     }
   } else {
-    let err17 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
-    vErrors === null ? vErrors = [err17] : vErrors.push(err17), errors++;
+    let err16 = { instancePath, schemaPath: "#/type", keyword: "type", params: { type: "object" }, message: "must be object" };
+    vErrors === null ? vErrors = [err16] : vErrors.push(err16), errors++;
   }
   return validate20.errors = vErrors, errors === 0;
 }

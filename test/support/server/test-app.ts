@@ -80,7 +80,7 @@ export class Browser {
   readonly agent: ReturnType<typeof request.agent>;
   token = '';
 
-  constructor(private readonly server: Server) {
+  constructor(server: Server) {
     this.agent = request.agent(server);
   }
 
