@@ -4,8 +4,7 @@ import { codeOf, messageOf } from '../error-parts';
 export type DatabaseFailure = 'away' | 'full' | 'unstorable-text';
 
 /** @see https://www.postgresql.org/docs/current/errcodes-appendix.html and Node's system errors */
-const AWAY =
-  /^(08|57P0[1-3]|53300|ECONNREFUSED|ECONNRESET|ETIMEDOUT|EPIPE|ENOTFOUND|EHOSTUNREACH|EAI_AGAIN)/;
+const AWAY = /^(08|57P0[1-3]|53300|ECONNREFUSED|ECONNRESET|ETIMEDOUT|EPIPE|ENOTFOUND|EHOSTUNREACH|EAI_AGAIN)/;
 
 /** Errors of pg and of Knex' pool that carry no code. */
 const AWAY_WORDS =

@@ -5,8 +5,9 @@ import path from 'node:path';
 import request from 'supertest';
 import { type Role } from '#schemas/api/session';
 import { type App, createApp, type Parts } from '../../../server/app';
-import { type Config, workerProgram } from '../../../server/config';
+import { type Config } from '../../../server/config';
 import { openLog } from '../../../server/http/request-log';
+import { bundledWorker } from './bundled-worker';
 import { makeCrew, PASSWORD, type TestCrew } from './test-crew';
 import { makeDatabase } from './test-database';
 
@@ -38,7 +39,7 @@ export async function startTestApp(parts: Parts = {}, settings: Partial<Config> 
     clientDir: path.join(storageDir, 'client'),
     publicOrigin: ORIGIN,
     logLevel: 'silent',
-    pictureWorker: workerProgram('plates/picture-worker'),
+    pictureWorker: bundledWorker(),
     ...settings,
   };
   const app = createApp(config, openLog('silent'), {
