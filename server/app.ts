@@ -40,13 +40,16 @@ export interface App {
   close(): Promise<void>;
 }
 
+const QUERY_CONNECTIONS = 10;
 /** Connections for sessions and rate limits, beside Knex' own pool. */
 const SESSION_CONNECTIONS = 5;
 const CONNECT_TIMEOUT_MS = 5000;
 
 /** Puts the application together. Nothing is connected yet; the first requests do that. */
 export function createApp(config: Config, log: Logger, parts: Parts = {}): App {
-  const db = connect(config.databaseUrl);
+  const db = connect(config.databaseUrl, QUERY_CONNECTIONS, words =>
+    log.debug({ words: String(words) }, 'Knex'),
+  );
   const pool = new pg.Pool({
     connectionString: config.databaseUrl,
     max: SESSION_CONNECTIONS,

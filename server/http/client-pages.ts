@@ -57,7 +57,7 @@ export function serveClient(app: Express, clientDir: string): void {
   );
   app.get('/{*path}', (req, res, next) => {
     // A missing script must not become a page: the browser would try to run it.
-    if (path.extname(req.path) === '') page(req, res, next);
+    if (!/\.[^/]*$/.test(req.path)) page(req, res, next);
     else res.status(404).type('text/plain').set('Cache-Control', 'no-store').send('Not found\n');
   });
 }

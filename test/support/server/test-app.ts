@@ -27,11 +27,20 @@ export interface TestApp {
   close(): Promise<void>;
 }
 
-export async function startTestApp(parts: Parts = {}, settings: Partial<Config> = {}): Promise<TestApp> {
+/**
+ * @param parts what stands in for the usual
+ * @param settings what differs from the tests' usual settings
+ * @param route given the database's address, the one that the application shall use
+ */
+export async function startTestApp(
+  parts: Parts = {},
+  settings: Partial<Config> = {},
+  route: (databaseUrl: string) => Promise<string> = url => Promise.resolve(url),
+): Promise<TestApp> {
   const database = await makeDatabase();
   const storageDir = await mkdtemp(path.join(tmpdir(), 'fairlead-test-'));
   const config: Config = {
-    databaseUrl: database.url,
+    databaseUrl: await route(database.url),
     host: '127.0.0.1',
     port: 0,
     sessionSecret: 'a secret of the tests alone',
