@@ -9,7 +9,7 @@ import { openSessions } from './accounts/sessions';
 import { type SignInAllowance, SignInLimits, USUAL_ALLOWANCE } from './accounts/sign-in-limits';
 import { type Config } from './config';
 import { connect } from './db/connect';
-import { securityHeaders, serveClient } from './http/client-pages';
+import { dataOnly, securityHeaders, serveClient } from './http/client-pages';
 import { errorHandler } from './http/error-handler';
 import { notFound } from './http/problem';
 import { registerRoutes } from './http/register';
@@ -81,7 +81,7 @@ export function createApp(config: Config, log: Logger, parts: Parts = {}): App {
   app.disable('etag');
   if (config.publicOrigin.startsWith('https:')) app.set('trust proxy', 1);
   app.use(requestLog(log), securityHeaders(config.publicOrigin), compression());
-  app.use('/api', sessions.middleware, authentication.session());
+  app.use('/api', dataOnly, sessions.middleware, authentication.session());
   registerRoutes(app, routes, db, guard);
   app.use('/api', () => {
     throw notFound('route');

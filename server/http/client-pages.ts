@@ -42,6 +42,12 @@ function contentSecurity(nonce: string): RequestHandler {
   });
 }
 
+/** For answers of the API: data, never a page, whoever opens them. */
+export const dataOnly: RequestHandler = (_req, res, next) => {
+  res.set('Content-Security-Policy', "default-src 'none'; frame-ancestors 'none'; sandbox");
+  next();
+};
+
 /** The client's files, and its one page for every address that names no file. */
 export function serveClient(app: Express, clientDir: string): void {
   const page = indexPage(path.join(clientDir, 'index.html'));

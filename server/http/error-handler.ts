@@ -69,7 +69,16 @@ function toProblem(error: unknown): Problem {
   if (codeOf(error) === 'ENOSPC') return diskFull();
   const failure = databaseFailure(error);
   if (failure) return DATABASE_PROBLEMS[failure]();
-  return bodyProblem(error) ?? unforeseen();
+  return bodyProblem(error) ?? requestProblem(error) ?? unforeseen();
+}
+
+/** What Express itself refuses, such as an address whose percent signs mean nothing. */
+function requestProblem(error: unknown): Problem | undefined {
+  if (typeof error !== 'object' || error === null || !('status' in error)) return undefined;
+  const { status } = error;
+  if (typeof status !== 'number' || status < 400 || status > 499) return undefined;
+  const detail = 'The request itself cannot be read, such as its address. Nothing was changed.';
+  return new Problem(status, 'unreadable-request', 'The request is not readable', detail);
 }
 
 function unforeseen(): Problem {

@@ -9,6 +9,7 @@ import { holdShot } from '../shots/shots-db';
 import { seeShot } from '../shots/shots-service';
 import { freshMove } from './fresh-move';
 import { findMove, insertMove, listMoves, type StoredMove, updateMove } from './moves-db';
+import { nestingFault } from './nesting';
 
 /** @throws Problem 404 for the shot */
 export async function seeMoves(scope: CrewScope, shotId: string): Promise<MoveSummary[]> {
@@ -50,7 +51,7 @@ export async function saveMove(
   scope: CrewScope,
   id: string,
   revision: number,
-  value: unknown,
+  value: object,
 ): Promise<StoredMove> {
   const document = sound(value);
   return scope.transaction(async trx => {
@@ -69,8 +70,9 @@ export async function deleteMove(scope: CrewScope, id: string): Promise<void> {
 }
 
 /** Pointers are into the body, where the document stands. */
-function sound(value: unknown): MoveDocument {
-  const checked = checkMove(value);
+function sound(value: object): MoveDocument {
+  const tooDeep = nestingFault(value);
+  const checked = tooDeep ? { ok: false as const, faults: [tooDeep] } : checkMove(value);
   if (checked.ok) return checked.document;
   throw invalid(
     checked.faults.map(({ pointer, detail }) => ({ pointer: `/document${pointer}`, detail })),

@@ -39,6 +39,8 @@ export class PictureReader {
     return new Promise((resolve, reject) => {
       const worker = fork(this.program.file, {
         execArgv: [...this.program.execArgv],
+        // It needs no secret of ours, so it gets none.
+        env: {},
         stdio: ['ignore', 'ignore', 'pipe', 'ipc'],
         timeout: MOST_SEC * 1000,
         killSignal: 'SIGKILL',

@@ -68,6 +68,16 @@ export async function findVersion(
   return row && { objectKey: row.object_key, mediaType: row.media_type };
 }
 
+/** @returns the last frame at which a plate of the shot stands; undefined where it has none */
+export async function lastPlateFrame(scope: CrewScope, shotId: string): Promise<number | undefined> {
+  const last = await scope
+    .rows<PlateRow>('plates')
+    .where({ shot_id: shotId })
+    .orderBy('frame', 'desc')
+    .first('frame');
+  return last?.frame;
+}
+
 export async function insertPlate(scope: CrewScope, plate: PlateFacts): Promise<void> {
   const { id, shotId, frame, fileName, width, height, bytes, projection } = plate;
   await scope.insert('plates', {

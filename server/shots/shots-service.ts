@@ -3,6 +3,7 @@ import { type CrewScope } from '../crews/crew-scope';
 import { uuidV7 } from '../db/uuid-v7';
 import { type Page } from '../http/paging';
 import { invalid, notFound, revisionConflict } from '../http/problem';
+import { lastPlateFrame } from '../plates/plates-db';
 import { findShoot, holdShoot } from '../shoots/shoots-db';
 import { changedFacts, factsOf, type ShotFacts, shotFaults } from './shot-facts';
 import { findShot, insertShot, listShots, updateShot } from './shots-db';
@@ -32,7 +33,11 @@ export async function createShot(scope: CrewScope, shootId: string, draft: ShotD
   });
 }
 
-/** Moves keep the facts that they were saved with. @throws Problem 404, 422; 412 with the shot as it is */
+/**
+ * Moves keep the facts that they were saved with; plates must stay inside the shot.
+ *
+ * @throws Problem 404, 422; 412 with the shot as it is
+ */
 export async function editShot(
   scope: CrewScope,
   id: string,
@@ -43,6 +48,7 @@ export async function editShot(
     const facts = changedFacts(await seeShot(trx, id), changes);
     if (!(await updateShot(trx, { id, revision }, sound(facts))))
       throw revisionConflict(await seeShot(trx, id));
+    await requirePlatesInside(trx, id, facts.frames);
     await trx.record('shot.edited', id, { revision: revision + 1 });
     return seeShot(trx, id);
   });
@@ -66,6 +72,13 @@ export async function deleteShotsOf(trx: CrewScope, shootId: string): Promise<vo
 async function deleteChildren(trx: CrewScope, shotIds: readonly string[]): Promise<void> {
   await trx.softDelete('plates', 'shot_id', shotIds);
   await trx.softDelete('moves', 'shot_id', shotIds);
+}
+
+async function requirePlatesInside(trx: CrewScope, shotId: string, frames: number): Promise<void> {
+  const last = await lastPlateFrame(trx, shotId);
+  if (last === undefined || last < frames) return;
+  const detail = `must be over ${last}, where a plate stands, is ${frames}; delete that plate first`;
+  throw invalid([{ pointer: '/frames', detail }], 'A plate would stand outside the shot');
 }
 
 function sound(facts: ShotFacts): ShotFacts {

@@ -104,6 +104,20 @@ describe('a document', () => {
     expect({}).not.toHaveProperty('polluted');
   });
 
+  it.each([200, 100_000])(
+    'with extensions %i levels deep is refused, as the database could not take it',
+    async levels => {
+      const deep = `{"other":${'['.repeat(levels)}${']'.repeat(levels)}}`;
+      const text = JSON.stringify({ document: { ...EXAMPLE, extensions: 0 } }).replace(
+        '"extensions":0',
+        `"extensions":${deep}`,
+      );
+      expect(pointers((await save().type('json').send(text).expect(422)).body)).toEqual([
+        '/document/extensions',
+      ]);
+    },
+  );
+
   it('nested 100,000 deep is refused', async () => {
     const text = `{"document":${'['.repeat(100_000)}${']'.repeat(100_000)}}`;
     await save().type('json').send(text).expect(422);
@@ -203,6 +217,14 @@ describe('an address', () => {
       const { body, headers } = await operator.get(url).expect(404);
       expect(headers['content-type']).toMatch(/^application\/problem\+json/);
       expect(body.type).toBe('/problems/not-found');
+    },
+  );
+
+  it.each(['/api/crews/%E0%A4%A/shoots', '/%E0%A4%A'])(
+    '%s, whose percent signs mean nothing, answers 400',
+    async url => {
+      const { body } = await operator.get(url).expect(400);
+      expect(body.type).toBe('/problems/unreadable-request');
     },
   );
 

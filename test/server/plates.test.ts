@@ -174,6 +174,16 @@ describe('a picture', () => {
     expect(shoot).toMatchObject({ shotCount: 1, cover });
   });
 
+  it('keeps its shot at least as long as where it stands', async () => {
+    const { body } = await send(await panorama(512), 'p.jpg', '100').expect(201);
+    const shorten = (frames: number) =>
+      operator.send('patch', `${crew}/shots/${body.shotId}`).set('If-Match', '"1"').send({ frames });
+    expect((await shorten(100).expect(422)).body.errors).toEqual([
+      { pointer: '/frames', detail: expect.stringContaining('100') },
+    ]);
+    await shorten(101).expect(200);
+  });
+
   it.each([
     ['../../etc/passwd.jpg', 'passwd.jpg'],
     ['C:\\pictures\\quay.jpg', 'quay.jpg'],
