@@ -55,7 +55,8 @@ export async function makeVersions({ file, folder }: PictureTask): Promise<Pictu
   const refused = refusal(header, claim);
   if (refused) return { refused };
   try {
-    return { made: await makeAll(file, folder, claim) };
+    const { width, height } = header.autoOrient;
+    return { made: await makeAll(file, folder, { size: { width, height }, claim }) };
   } catch (error) {
     return reportOf(error);
   }
@@ -104,15 +105,24 @@ function refusal(header: Metadata, claim: PanoramaClaim | undefined): PictureRef
   return undefined;
 }
 
-async function makeAll(file: string, folder: string, claim: PanoramaClaim | undefined): Promise<PictureMade> {
-  const { size, pixels: whole } = await decode(file);
+async function makeAll(
+  file: string,
+  folder: string,
+  { size, claim }: { readonly size: Size; readonly claim: PanoramaClaim | undefined },
+): Promise<PictureMade> {
   const versions: MadeVersion[] = [];
-  let pixels = whole;
+  let pixels: Pixels | undefined;
   for (const [name, most] of WIDTHS) {
-    pixels = await shrunk(pixels, Math.min(most, size.width));
+    const wanted = sizeWithin(size, most);
+    pixels = pixels ? await shrunk(pixels, wanted) : await decode(file, wanted);
     versions.push(await write(pixels, name, folder));
   }
   return { ...size, projection: claim ? 'stated' : 'assumed', versions };
+}
+
+interface Size {
+  readonly width: number;
+  readonly height: number;
 }
 
 /** Decoded pixels: 8-bit sRGB, no alpha, upright. */
@@ -121,16 +131,25 @@ interface Pixels {
   readonly info: OutputInfo;
 }
 
-/** Decodes all of it, so that a file that is cut short is found before anything is kept. */
-async function decode(file: string): Promise<{ size: { width: number; height: number }; pixels: Pixels }> {
+function sizeWithin({ width, height }: Size, mostWidth: number): Size {
+  if (width <= mostWidth) return { width, height };
+  return { width: mostWidth, height: Math.round((height * mostWidth) / width) };
+}
+
+/**
+ * Decodes all of it, so that a file that is cut short is found before anything is kept. Shrinking in the same pass keeps
+ * a picture of 12,000 pixels from standing in memory whole.
+ */
+async function decode(file: string, { width, height }: Size): Promise<Pixels> {
   const limitInputPixels = (MOST_WIDTH + SHAPE_TOLERANCE_PX) * (MOST_HEIGHT + SHAPE_TOLERANCE_PX);
-  const upright = sharp(file, { failOn: 'error', limitInputPixels, sequentialRead: true })
+  return sharp(file, { failOn: 'error', limitInputPixels, sequentialRead: true })
     .timeout({ seconds: TIMEOUT_SEC })
     .autoOrient()
     .flatten({ background: '#000' })
-    .toColourspace('srgb');
-  const pixels = await upright.raw({ depth: 'uchar' }).toBuffer({ resolveWithObject: true });
-  return { size: { width: pixels.info.width, height: pixels.info.height }, pixels };
+    .resize(width, height, { fit: 'fill', kernel: 'lanczos3', fastShrinkOnLoad: false })
+    .toColourspace('srgb')
+    .raw({ depth: 'uchar' })
+    .toBuffer({ resolveWithObject: true });
 }
 
 const opened = ({ data, info: { width, height, channels } }: Pixels): Sharp =>
@@ -138,15 +157,10 @@ const opened = ({ data, info: { width, height, channels } }: Pixels): Sharp =>
     seconds: TIMEOUT_SEC,
   });
 
-/** Half as wide makes half as high, rounded up: a picture of one row more than it should have keeps its last row. */
-async function shrunk(pixels: Pixels, width: number): Promise<Pixels> {
-  const { info } = pixels;
-  if (width === info.width) return pixels;
-  const height = Math.max(1, Math.round((info.height * width) / info.width));
-  return opened(pixels)
-    .resize(width, height, { fit: 'fill', kernel: 'lanczos3' })
-    .raw()
-    .toBuffer({ resolveWithObject: true });
+async function shrunk(pixels: Pixels, { width, height }: Size): Promise<Pixels> {
+  if (width === pixels.info.width) return pixels;
+  const small = opened(pixels).resize(width, height, { fit: 'fill', kernel: 'lanczos3' });
+  return small.raw().toBuffer({ resolveWithObject: true });
 }
 
 async function write(pixels: Pixels, name: PlateVersionName, folder: string): Promise<MadeVersion> {

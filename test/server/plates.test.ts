@@ -104,6 +104,26 @@ describe('a picture', () => {
     expect((await send(picture, 'picture.jpg').expect(201)).body).toMatchObject({ width: 1024, height: 512 });
   });
 
+  it.each([
+    ['grey', (s: sharp.Sharp) => s.greyscale().jpeg()],
+    ['with 16 bits a channel', (s: sharp.Sharp) => s.toColourspace('rgb16').png()],
+    ['half transparent', (s: sharp.Sharp) => s.ensureAlpha(0.5).png()],
+    ['of four printing inks', (s: sharp.Sharp) => s.toColourspace('cmyk').jpeg()],
+    ['of a palette', (s: sharp.Sharp) => s.png({ palette: true, colours: 4 })],
+    ['progressive', (s: sharp.Sharp) => s.jpeg({ progressive: true })],
+  ])('that is %s becomes plain 8-bit sRGB', async (_kind, encode) => {
+    const { body } = await send(await encode(sharp(await panorama(640))).toBuffer()).expect(201);
+    for (const version of body.versions) {
+      const { space, channels, depth, hasAlpha } = await sharp(await bytesOf(version.url)).metadata();
+      expect({ space, channels, depth, hasAlpha }).toEqual({
+        space: 'srgb',
+        channels: 3,
+        depth: 'uchar',
+        hasAlpha: false,
+      });
+    }
+  });
+
   it('is turned upright by its orientation mark before it is measured', async () => {
     // EXIF orientation 6: the stored rows are columns of the picture (Exif 2.32, 4.6.4, tag 274).
     const lying = await sharp(await panorama(1024))
