@@ -1,5 +1,4 @@
-import { randomUUID } from 'node:crypto';
-import { copyFile, link, mkdir, open, rm } from 'node:fs/promises';
+import { access, mkdir, open, rename, rm } from 'node:fs/promises';
 import path from 'node:path';
 import { codeOf } from '../error-parts';
 import { type ObjectStorage } from './object-storage';
@@ -16,19 +15,11 @@ export class LocalStorage implements ObjectStorage {
 
   async put(key: string, file: string): Promise<boolean> {
     const place = this.pathOf(key);
-    const beside = `${place}.${randomUUID()}.new`;
+    if (await isThere(place)) return false;
     await mkdir(path.dirname(place), { recursive: true });
-    try {
-      await copyFile(file, beside);
-      // A link, unlike a rename, says whether it was there.
-      await link(beside, place);
-      return true;
-    } catch (error) {
-      if (codeOf(error) === 'EEXIST') return false;
-      throw error;
-    } finally {
-      await rm(beside, { force: true });
-    }
+    await settle(file);
+    await rename(file, place);
+    return true;
   }
 
   async get(key: string) {
@@ -49,5 +40,22 @@ export class LocalStorage implements ObjectStorage {
   private pathOf(key: string): string {
     if (!KEY.test(key)) throw new Error(`Not a storage key: ${key}`);
     return path.join(this.folder, key);
+  }
+}
+
+async function isThere(place: string): Promise<boolean> {
+  return access(place).then(
+    () => true,
+    () => false,
+  );
+}
+
+/** Waits until the file is on the disk itself: the rows that will refer to it survive a power cut, so must it. */
+async function settle(file: string): Promise<void> {
+  const handle = await open(file, 'r+');
+  try {
+    await handle.sync();
+  } finally {
+    await handle.close();
   }
 }

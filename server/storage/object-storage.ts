@@ -3,9 +3,9 @@ import { type Readable } from 'node:stream';
 /** Where pictures are kept: a local folder now, a bucket on more machines. Keys are ours, never a person's words. */
 export interface ObjectStorage {
   /**
-   * Puts a whole file into place, at once or not at all.
+   * Takes a whole file into place, at once or not at all.
    *
-   * @param file path of a local file, which stays
+   * @param file a temporary file in the storage folder; it may be gone afterwards
    * @returns false where the key was there already (keys carry their content's hash, so it is the same)
    */
   put(key: string, file: string): Promise<boolean>;
