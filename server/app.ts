@@ -6,7 +6,7 @@ import { type Logger } from 'pino';
 import { Authentication } from './accounts/authentication';
 import { sessionRoutes } from './accounts/session-routes';
 import { openSessions } from './accounts/sessions';
-import { type SignInAllowance, SignInLimits, USUAL_ALLOWANCE } from './accounts/sign-in-limits';
+import { type SignInAllowance, SignInLimits, USUAL_SIGN_INS } from './accounts/sign-in-limits';
 import { type Config } from './config';
 import { connect } from './db/connect';
 import { dataOnly, securityHeaders, serveClient } from './http/client-pages';
@@ -21,6 +21,7 @@ import { moveRoutes } from './moves/move-routes';
 import { PictureReader } from './plates/picture-reader';
 import { plateRoutes } from './plates/plate-routes';
 import { PictureReceiver } from './plates/receive-picture';
+import { limitUploads, USUAL_UPLOADS } from './plates/upload-limit';
 import { shootRoutes } from './shoots/shoot-routes';
 import { shotRoutes } from './shots/shot-routes';
 import { LocalStorage, objectsFolder } from './storage/local-storage';
@@ -29,7 +30,9 @@ import { type ObjectStorage } from './storage/object-storage';
 /** What a test may bring instead of the usual. */
 export interface Parts {
   readonly storage?: ObjectStorage;
-  readonly allowance?: SignInAllowance;
+  readonly signIns?: SignInAllowance;
+  /** Of one person within ten minutes. */
+  readonly uploads?: number;
 }
 
 /** A running application: everything that was opened, and how to close it. */
@@ -61,7 +64,7 @@ export function createApp(config: Config, log: Logger, parts: Parts = {}): App {
   const sessions = openSessions(pool, config.sessionSecret, config.publicOrigin);
   const authentication = new Authentication(db);
   const guard = new WriteGuard(config.sessionSecret, config.publicOrigin);
-  const limits = new SignInLimits(pool, parts.allowance ?? USUAL_ALLOWANCE);
+  const limits = new SignInLimits(pool, parts.signIns ?? USUAL_SIGN_INS);
   const receiver = new PictureReceiver(config.storageDir);
   const tools = {
     reader: new PictureReader(config.pictureWorker),
@@ -71,7 +74,7 @@ export function createApp(config: Config, log: Logger, parts: Parts = {}): App {
     ...sessionRoutes({ db, authentication, limits, guard, sessionCookie: sessions.cookieName }),
     ...shootRoutes(),
     ...shotRoutes(),
-    ...plateRoutes(tools, receiver),
+    ...plateRoutes(tools, receiver, limitUploads(pool, parts.uploads ?? USUAL_UPLOADS)),
     ...moveRoutes(),
   ];
   const routes = [...systemRoutes(db, featureRoutes), ...featureRoutes];

@@ -1,30 +1,30 @@
 import { createHash } from 'node:crypto';
 import { type Pool } from 'pg';
-import {
-  type RateLimiterAbstract,
-  RateLimiterMemory,
-  RateLimiterPostgres,
-  RateLimiterRes,
-} from 'rate-limiter-flexible';
-import { Problem } from '../http/problem';
+import { type RateLimiterAbstract } from 'rate-limiter-flexible';
+import { countTry, openLimiter } from '../http/rate-limits';
 
 const WINDOW_SEC = 15 * 60;
+const WHAT = 'Signing in was tried';
 
 /** Wrong passwords within the window: a forgetful person's few, and those of a whole office behind one address. */
 export interface SignInAllowance {
   readonly ofAccountAndAddress: number;
   readonly ofAddress: number;
 }
-export const USUAL_ALLOWANCE: SignInAllowance = { ofAccountAndAddress: 10, ofAddress: 100 };
+export const USUAL_SIGN_INS: SignInAllowance = { ofAccountAndAddress: 10, ofAddress: 100 };
 
-/** Counts tries at signing in, in PostgreSQL for all processes together; by memory alone while the database is away. */
+/** Counts tries at signing in. */
 export class SignInLimits {
   readonly #pair: RateLimiterAbstract;
   readonly #address: RateLimiterAbstract;
 
-  constructor(pool: Pool, allowance: SignInAllowance) {
-    this.#pair = limiter(pool, 'sign-in-pair', allowance.ofAccountAndAddress);
-    this.#address = limiter(pool, 'sign-in-address', allowance.ofAddress);
+  constructor(pool: Pool, { ofAccountAndAddress, ofAddress }: SignInAllowance) {
+    this.#pair = openLimiter(pool, {
+      name: 'sign-in-pair',
+      points: ofAccountAndAddress,
+      windowSec: WINDOW_SEC,
+    });
+    this.#address = openLimiter(pool, { name: 'sign-in-address', points: ofAddress, windowSec: WINDOW_SEC });
   }
 
   /**
@@ -33,8 +33,8 @@ export class SignInLimits {
    * @throws Problem 429 with Retry-After
    */
   async begin(email: string, address: string): Promise<void> {
-    await consume(this.#address, address);
-    await consume(this.#pair, pairKey(email, address));
+    await countTry(this.#address, address, WHAT);
+    await countTry(this.#pair, pairKey(email, address), WHAT);
   }
 
   /** The password was right: this try and the wrong ones before it no longer count. */
@@ -44,37 +44,7 @@ export class SignInLimits {
   }
 }
 
-function limiter(pool: Pool, keyPrefix: string, points: number): RateLimiterAbstract {
-  const insuranceLimiter = new RateLimiterMemory({ keyPrefix, points, duration: WINDOW_SEC });
-  return new RateLimiterPostgres({
-    storeClient: pool,
-    tableName: 'rate_limits',
-    tableCreated: true,
-    keyPrefix,
-    points,
-    duration: WINDOW_SEC,
-    insuranceLimiter,
-  });
-}
-
 /** Hashed: the table shall not become a list of who tried to sign in. */
 function pairKey(email: string, address: string): string {
   return createHash('sha256').update(`${email.toLowerCase()}\n${address}`).digest('base64url');
-}
-
-async function consume(limits: RateLimiterAbstract, key: string): Promise<void> {
-  try {
-    await limits.consume(key);
-  } catch (refusal) {
-    if (!(refusal instanceof RateLimiterRes)) throw refusal;
-    const waitSec = Math.max(1, Math.ceil(refusal.msBeforeNext / 1000));
-    throw new Problem(
-      429,
-      'too-many-tries',
-      'Too many tries',
-      `Signing in was tried too often. Wait ${Math.ceil(waitSec / 60)} minutes, then try again.`,
-      {},
-      { 'Retry-After': String(waitSec) },
-    );
-  }
 }

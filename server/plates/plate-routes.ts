@@ -1,4 +1,4 @@
-import { type Response } from 'express';
+import { type RequestHandler, type Response } from 'express';
 import { pipeline } from 'node:stream/promises';
 import { notFound } from '../http/problem';
 import { crewRoute, type CrewRoute, pathValue } from '../http/route';
@@ -9,7 +9,12 @@ import { type PictureReceiver } from './receive-picture';
 
 const OF_SHOT = '/shots/:shotId/plates';
 
-export function plateRoutes(tools: PictureTools, receiver: PictureReceiver): CrewRoute[] {
+/** @param limit middleware that stops whoever sends too much */
+export function plateRoutes(
+  tools: PictureTools,
+  receiver: PictureReceiver,
+  limit: RequestHandler,
+): CrewRoute[] {
   return [
     crewRoute(
       {
@@ -27,7 +32,7 @@ export function plateRoutes(tools: PictureTools, receiver: PictureReceiver): Cre
     crewRoute(
       {
         ...{ method: 'post', path: OF_SHOT, action: 'plates.create', summary: 'Add a plate' },
-        ...{ body: 'upload', answer: [201, 'Plate'], before: receiver.handlers() },
+        ...{ body: 'upload', answer: [201, 'Plate'], before: [limit, ...receiver.handlers()] },
       },
       ({ scope, req, res }) =>
         receiver.with(req, async picture => {

@@ -3,7 +3,7 @@ import { request as httpRequest } from 'node:http';
 import { type AddressInfo } from 'node:net';
 import path from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
-import sharp from 'sharp';
+import sharp, { type Sharp } from 'sharp';
 import { LocalStorage, objectsFolder } from '../../server/storage/local-storage';
 import { type ObjectStorage } from '../../server/storage/object-storage';
 import { base, makeShot } from '../support/server/crew-work';
@@ -105,12 +105,12 @@ describe('a picture', () => {
   });
 
   it.each([
-    ['grey', (s: sharp.Sharp) => s.greyscale().jpeg()],
-    ['with 16 bits a channel', (s: sharp.Sharp) => s.toColourspace('rgb16').png()],
-    ['half transparent', (s: sharp.Sharp) => s.ensureAlpha(0.5).png()],
-    ['of four printing inks', (s: sharp.Sharp) => s.toColourspace('cmyk').jpeg()],
-    ['of a palette', (s: sharp.Sharp) => s.png({ palette: true, colours: 4 })],
-    ['progressive', (s: sharp.Sharp) => s.jpeg({ progressive: true })],
+    ['grey', (s: Sharp) => s.greyscale().jpeg()],
+    ['with 16 bits a channel', (s: Sharp) => s.toColourspace('rgb16').png()],
+    ['half transparent', (s: Sharp) => s.ensureAlpha(0.5).png()],
+    ['of four printing inks', (s: Sharp) => s.toColourspace('cmyk').jpeg()],
+    ['of a palette', (s: Sharp) => s.png({ palette: true, colours: 4 })],
+    ['progressive', (s: Sharp) => s.jpeg({ progressive: true })],
   ])('that is %s becomes plain 8-bit sRGB', async (_kind, encode) => {
     const { body } = await send(await encode(sharp(await panorama(640))).toBuffer()).expect(201);
     for (const version of body.versions) {
@@ -387,6 +387,24 @@ describe('refused, with nothing stored', () => {
     upload.destroy();
     for (let i = 0; i < 100 && (await app.storedFiles()).length > files.length; i++) await sleep(20);
   });
+});
+
+it('is no longer taken from a person who has sent too many, and others go on', async () => {
+  const strict = await startTestApp({ uploads: 1 });
+  try {
+    const picture = await panorama(512);
+    const [first, second] = [await signedIn(strict, 'operator'), await signedIn(strict, 'lead')];
+    const { shotId } = await makeShot(first, strict.crew);
+    const sendBy = (browser: Browser) =>
+      browser.send('post', `${base(strict.crew)}/shots/${shotId}/plates`).attach('picture', picture, 'p.jpg');
+    await sendBy(first).expect(201);
+    const { body, headers } = await sendBy(first).expect(429);
+    expect(body.type).toBe('/problems/too-many-tries');
+    expect(Number(headers['retry-after'])).toBeGreaterThan(0);
+    await sendBy(second).expect(201);
+  } finally {
+    await strict.close();
+  }
 });
 
 describe('a full disk', () => {

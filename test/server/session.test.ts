@@ -141,7 +141,7 @@ describe('changing things', () => {
 
 describe('trying passwords', () => {
   it('stops after the allowed tries, for this account from this address, even when all come at once', async () => {
-    const strict = await startTestApp({ allowance: { ofAccountAndAddress: 5, ofAddress: 100 } });
+    const strict = await startTestApp({ signIns: { ofAccountAndAddress: 5, ofAddress: 100 } });
     try {
       const browser = await new Browser(strict.server).open();
       const attempt = (address: string, password: string) =>
@@ -161,7 +161,7 @@ describe('trying passwords', () => {
   });
 
   it('forgets wrong tries after a right one', async () => {
-    const strict = await startTestApp({ allowance: { ofAccountAndAddress: 3, ofAddress: 100 } });
+    const strict = await startTestApp({ signIns: { ofAccountAndAddress: 3, ofAddress: 100 } });
     try {
       const browser = await new Browser(strict.server).open();
       const address = strict.crew.emailOf('lead');

@@ -52,7 +52,7 @@ export async function startTestApp(
     ...settings,
   };
   const app = createApp(config, openLog('silent'), {
-    allowance: { ofAccountAndAddress: 50, ofAddress: 500 },
+    signIns: { ofAccountAndAddress: 50, ofAddress: 500 },
     ...parts,
   });
   const crew = await makeCrew(app.db, 'quay');
