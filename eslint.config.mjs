@@ -26,6 +26,8 @@ export default defineConfig(
     'coverage/',
     'test-results/',
     'schemas/generated/',
+    // AssemblyScript: its own compiler checks it.
+    'wasm/',
     'node_modules/',
   ]),
   js.configs.recommended,
