@@ -38,6 +38,13 @@ function listed(known: readonly string[]): string {
   return known.length > 0 ? `; it takes ${known.map(name => `--${name}`).join(', ')}` : '';
 }
 
+/** @throws UsageError where an option that the verb needs is missing */
+export function wanted(words: Words, name: string): string {
+  const value = words.options.get(name);
+  if (value === undefined || value === '') throw new UsageError(`--${name} is missing.`);
+  return value;
+}
+
 /**
  * @param allowed the values that an option may have, the default first
  * @throws UsageError
