@@ -45,7 +45,7 @@ describe.each(SOURCES)('framed pictures of %s', name => {
     }
   });
 
-  it.each(renderPoses(80, 46))('are smooth where the view shrinks the source: $name', view => {
+  it.each(renderPoses(240, 136))('are smooth where the view shrinks the source: $name', view => {
     const truth = referenceFrame(source, view, 8);
     for (const [way, render] of ways) {
       expect([way, signalToNoiseDb(render(view, 'preview'), truth) >= 35]).toEqual([way, true]);
