@@ -5,36 +5,47 @@ import { COUNTER_AT, WasmRenderer } from '#shared/render/wasm-renderer';
 import { instantiateRenderer, openRendererModule } from './renderer-module';
 
 /** Rows that a thread takes at a time: small enough that both end together, large enough that counting costs nothing. */
-const BAND = 16;
+const BAND = 8;
+
+/** Words of shared memory, from COUNTER_AT on: rows handed out, jobs begun, the job's numbers, scratch of each thread. */
+const WORDS = { row: 0, job: 1, parametersAt: 2, height: 3, scratchAt: 4 };
 
 /**
- * A thread's program, as text: so it runs from any bundle without a file of its own. A message is a job's numbers; an
- * answer says that no rows are left.
+ * A thread's program, as text: so it runs from any bundle without a file of its own. It sleeps on the count of jobs
+ * and answers each when no rows are left.
  */
 const THREAD = `
-const { parentPort, workerData: { module, memory, counterAt, band } } = require('node:worker_threads');
+const { parentPort, workerData: { module, memory, counterAt, band, at, index } } = require('node:worker_threads');
 const { renderRows } = new WebAssembly.Instance(module, { env: { memory } }).exports;
-const counter = new Int32Array(memory.buffer, counterAt, 1);
-parentPort.on('message', ({ parametersAt, scratchAt, height }) => {
-  for (let row = Atomics.add(counter, 0, band); row < height; row = Atomics.add(counter, 0, band)) {
-    renderRows(parametersAt, scratchAt, row, Math.min(row + band, height));
+const words = new Int32Array(memory.buffer, counterAt, at.scratchAt + index + 1);
+for (let job = 0; ; ) {
+  Atomics.wait(words, at.job, job);
+  job = Atomics.load(words, at.job);
+  const parametersAt = words[at.parametersAt], height = words[at.height], scratch = words[at.scratchAt + index];
+  for (let row = Atomics.add(words, at.row, band); row < height; row = Atomics.add(words, at.row, band)) {
+    renderRows(parametersAt, scratch, row, Math.min(row + band, height));
   }
   parentPort.postMessage(null);
-});
+}
 `;
 
 /** Renders framed pictures on several threads that share one memory. */
 export class FramePool {
   readonly #renderer: WasmRenderer;
   readonly #threads: readonly Worker[];
+  readonly #words: Int32Array;
   #busy: Promise<unknown> = Promise.resolve();
 
-  /** @param threads at least 1 */
+  /** @param threads 1 to 64 */
   constructor(threads: number) {
     const opened = openRendererModule('shared');
     this.#renderer = new WasmRenderer(instantiateRenderer(opened), opened.memory);
-    const workerData = { ...opened, counterAt: COUNTER_AT, band: BAND };
-    this.#threads = Array.from({ length: threads }, () => new Worker(THREAD, { eval: true, workerData }));
+    const shared = { ...opened, counterAt: COUNTER_AT, band: BAND, at: WORDS };
+    this.#words = new Int32Array(opened.memory.buffer, COUNTER_AT, WORDS.scratchAt + threads);
+    this.#threads = Array.from(
+      { length: threads },
+      (_, index) => new Worker(THREAD, { eval: true, workerData: { ...shared, index } }),
+    );
   }
 
   /** Copies the source in, after the pictures asked for before. */
@@ -50,15 +61,11 @@ export class FramePool {
   render<T>(view: View, sampling: Sampling, use: (rgba: Uint8Array) => T | Promise<T>): Promise<T> {
     return this.#inTurn(async () => {
       const job = this.#renderer.prepare(view, sampling, this.#threads.length);
-      await Promise.all(
-        this.#threads.map((thread, i) =>
-          askThread(thread, {
-            parametersAt: job.parametersAt,
-            scratchAt: job.scratchAt[i],
-            height: job.height,
-          }),
-        ),
-      );
+      const answers = Promise.all(this.#threads.map(answerOf));
+      this.#words.set([job.parametersAt, job.height, ...job.scratchAt], WORDS.parametersAt);
+      Atomics.add(this.#words, WORDS.job, 1);
+      Atomics.notify(this.#words, WORDS.job);
+      await answers;
       return use(this.#renderer.picture(job));
     });
   }
@@ -76,13 +83,7 @@ export class FramePool {
   }
 }
 
-interface ThreadJob {
-  readonly parametersAt: number;
-  readonly scratchAt: number;
-  readonly height: number;
-}
-
-function askThread(thread: Worker, job: ThreadJob): Promise<void> {
+function answerOf(thread: Worker): Promise<void> {
   return new Promise((resolve, reject) => {
     const settle = (act: () => void) => () => {
       thread.off('message', answered).off('error', failed).off('exit', ended);
@@ -94,6 +95,5 @@ function askThread(thread: Worker, job: ThreadJob): Promise<void> {
       reject(new Error('A rendering thread was ended before its picture was done.')),
     );
     thread.on('message', answered).on('error', failed).on('exit', ended);
-    thread.postMessage(job);
   });
 }
