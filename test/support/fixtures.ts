@@ -24,7 +24,9 @@ export interface ScipyCase {
   readonly sampleTimes: number[];
   readonly slerp: { readonly q: Rows; readonly omega: Rows };
   readonly rotationSpline: { readonly q: Rows; readonly omega: Rows; readonly alpha: Rows };
-  readonly fovCubicSpline: Readonly<Record<string, { readonly v: number[]; readonly d1: number[] } | undefined>>;
+  readonly fovCubicSpline: Readonly<
+    Record<string, { readonly v: number[]; readonly d1: number[] } | undefined>
+  >;
 }
 
 export const scipyCases = jsonFixture<{ cases: ScipyCase[] }>('scipy-reference.json').cases;

@@ -50,24 +50,32 @@ describe('arc legs', () => {
 describe('fair arc legs', () => {
   it.each(cases.map(test => [test.name, test] as const))('follow SciPy RotationSpline: %s', (name, test) => {
     // SciPy stops after ten rounds; on wild keys its own residual leaves about 1e-4 degrees (test/fixtures/README.md).
-    const tolerance = /^random-(0[1-6])|near-pole|nonuniform|pole|pitched|360|middle/.test(name) ? 2e-5 : 2e-4;
+    const tolerance = /^random-(0[1-6])|near-pole|nonuniform|pole|pitched|360|middle/.test(name)
+      ? 2e-5
+      : 2e-4;
     expect(worstAngleDeg(test, fairArc, test.rotationSpline.q)).toBeLessThan(tolerance);
   });
 });
 
 describe('clamped cubic spline', () => {
-  it.each(scipyCases.map(test => [test.name, test] as const))('is SciPy CubicSpline with bc_type clamped: %s', (_name, test) => {
-    const { times, fovKeys, sampleTimes } = test;
-    const truth = test.fovCubicSpline['clamped'];
-    const slopes = clampedSplineSlopes(times, fovKeys, 0, 0);
-    const table = new Float64Array(4);
-    sampleTimes.forEach((time, i) => {
-      const leg = Math.max(times.findLastIndex(start => start <= time && start < times[times.length - 1]), 0);
-      const duration = times[leg + 1] - times[leg];
-      writeCubic(table, 0, fovKeys[leg], fovKeys[leg + 1], slopes[leg], slopes[leg + 1], duration);
-      const s = (time - times[leg]) / duration;
-      expect(cubic(table, 0, s)).toBeCloseTo(truth?.v[i] ?? NaN, 9);
-      expect(cubicSlope(table, 0, s) / duration).toBeCloseTo(truth?.d1[i] ?? NaN, 8);
-    });
-  });
+  it.each(scipyCases.map(test => [test.name, test] as const))(
+    'is SciPy CubicSpline with bc_type clamped: %s',
+    (_name, test) => {
+      const { times, fovKeys, sampleTimes } = test;
+      const truth = test.fovCubicSpline['clamped'];
+      const slopes = clampedSplineSlopes(times, fovKeys, 0, 0);
+      const table = new Float64Array(4);
+      sampleTimes.forEach((time, i) => {
+        const leg = Math.max(
+          times.findLastIndex(start => start <= time && start < times[times.length - 1]),
+          0,
+        );
+        const duration = times[leg + 1] - times[leg];
+        writeCubic(table, 0, fovKeys[leg], fovKeys[leg + 1], slopes[leg], slopes[leg + 1], duration);
+        const s = (time - times[leg]) / duration;
+        expect(cubic(table, 0, s)).toBeCloseTo(truth?.v[i] ?? NaN, 9);
+        expect(cubicSlope(table, 0, s) / duration).toBeCloseTo(truth?.d1[i] ?? NaN, 8);
+      });
+    },
+  );
 });

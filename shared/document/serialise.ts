@@ -1,0 +1,78 @@
+import { type Deliverable, type Key, type MoveDocument, type Shot } from '#schemas/move';
+
+/** The members of each part in the order that FORMATS shows them: a document reads the same whoever wrote it. */
+const ORDER = {
+  document: ['format', 'version', 'title', 'notes', 'shot', 'deliverables', 'keys', 'extensions'],
+  shot: [
+    ...[
+      'title',
+      'rate',
+      'frames',
+      'speed',
+      'from',
+      'to',
+      'start',
+      'dropFrame',
+      'source',
+      'level',
+      'seamYaw',
+      'loops',
+    ],
+    ...['exposure', 'interval', 'extensions'],
+  ],
+  deliverable: ['name', 'width', 'height', 'match', 'extensions'],
+  key: ['frame', 'yaw', 'pitch', 'roll', 'fov', 'eye', 'rest', 'leg', 'extensions'],
+} as const satisfies Record<string, readonly string[]>;
+
+/**
+ * A move document as text that people read and compare: members in a fixed order, a key on one line.
+ *
+ * @returns JSON that parses to an equal document; no −0
+ */
+export function serialiseMove(document: MoveDocument): string {
+  const members = ordered(document, ORDER.document).map(
+    ([name, value]) => `  ${quote(name)}: ${member(name, value, document)}`,
+  );
+  return `{\n${members.join(',\n')}\n}\n`;
+}
+
+function member(name: string, value: unknown, document: MoveDocument): string {
+  switch (name) {
+    case 'keys':
+      return lines(document.keys.map(key => line(key, ORDER.key)));
+    case 'deliverables':
+      return lines(document.deliverables.map(each => line(each, ORDER.deliverable)));
+    case 'shot':
+      return line(document.shot, ORDER.shot);
+    default:
+      return quote(value);
+  }
+}
+
+function line(part: Key | Deliverable | Shot, order: readonly string[]): string {
+  return `{ ${ordered(part, order)
+    .map(([name, value]) => `${quote(name)}: ${spaced(value)}`)
+    .join(', ')} }`;
+}
+
+function lines(entries: readonly string[]): string {
+  return `[\n${entries.map(entry => `    ${entry}`).join(',\n')}\n  ]`;
+}
+
+function ordered(part: object, order: readonly string[]): [string, unknown][] {
+  return Object.entries(part)
+    .filter(([, value]) => value !== undefined)
+    .sort(([a], [b]) => order.indexOf(a) - order.indexOf(b));
+}
+
+function quote(value: unknown): string {
+  return JSON.stringify(value, (_name, each: unknown) => (Object.is(each, -0) ? 0 : each));
+}
+
+/** Small parts with a blank after each comma and colon, as a person would write them. */
+function spaced(value: unknown): string {
+  if (Array.isArray(value)) return `[${value.map(spaced).join(', ')}]`;
+  if (typeof value !== 'object' || value === null) return quote(value);
+  const members = Object.entries(value).map(([name, each]) => `${quote(name)}: ${spaced(each)}`);
+  return members.length === 0 ? '{}' : `{ ${members.join(', ')} }`;
+}

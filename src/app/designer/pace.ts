@@ -1,0 +1,69 @@
+import { DEG_PER_RAD } from '#shared/conventions';
+import { type CompleteShotTimes } from '#shared/document/shot-times';
+import { type CompiledMove, POSE_SIZE } from '#shared/path/compiled-move';
+import { latOfDirection, lonOfDirection } from '#shared/projection/equirectangular';
+import { radiusAtAngle } from '#shared/projection/general-perspective';
+import { rotate } from '#shared/rotation/quaternion';
+import { sourceFramesPerDeliveredSecond } from '#shared/time/delivered-time';
+
+/**
+ * Shortest time that a still thing may need to cross the frame's width at 24 to 30 frames a second and a 180° shutter,
+ * seconds; faster pans strobe. Common practice, no source.
+ */
+export const CROSSING_LIMIT_SEC = 7;
+
+/** A point of the course: where the frame's centre is, and how fast it passes. */
+export interface CoursePoint {
+  readonly frame: number;
+  readonly lonDeg: number;
+  readonly latDeg: number;
+  /** Pan rate as a share of the fastest that keeps the crossing time: 0 stands, 1 is at the limit. */
+  readonly pace: number;
+}
+
+/** Half a step to either side of a point that its rate is taken over, as a share of the step between points. */
+const SIDE = 0.5;
+
+/**
+ * The course and its pace at even steps.
+ *
+ * @param points at least 2
+ * @returns points from the first key to the last; one point where there is but one key
+ */
+export function coursePoints(move: CompiledMove, times: CompleteShotTimes, points: number): CoursePoint[] {
+  const { firstFrame, lastFrame } = move;
+  const step = (lastFrame - firstFrame) / (points - 1);
+  if (step === 0) return [pointAt(move, firstFrame, 0, 1)];
+  const perSecond = sourceFramesPerDeliveredSecond(times);
+  return Array.from({ length: points }, (_, i) =>
+    pointAt(move, firstFrame + i * step, step * SIDE, perSecond),
+  );
+}
+
+function pointAt(move: CompiledMove, frame: number, side: number, framesPerSecond: number): CoursePoint {
+  const pose = new Float64Array(POSE_SIZE);
+  const forward = forwardAt(move, pose, frame);
+  const [fov, eye] = [pose[4], pose[5]];
+  const from = Math.max(frame - side, move.firstFrame);
+  const to = Math.min(frame + side, move.lastFrame);
+  const turned = side === 0 ? 0 : angle(forwardAt(move, pose, from), forwardAt(move, pose, to));
+  const panRate = side === 0 ? 0 : (turned / (to - from)) * framesPerSecond;
+  const crossing = (2 * radiusAtAngle(fov / 2, eye)) / panRate;
+  return {
+    frame,
+    lonDeg: lonOfDirection(forward) * DEG_PER_RAD,
+    latDeg: latOfDirection(forward) * DEG_PER_RAD,
+    pace: CROSSING_LIMIT_SEC / crossing,
+  };
+}
+
+function forwardAt(move: CompiledMove, pose: Float64Array, frame: number): Float64Array {
+  const forward = new Float64Array([0, 0, -1]);
+  rotate(forward, move.poseAt(pose, frame), forward);
+  return forward;
+}
+
+function angle(a: Float64Array, b: Float64Array): number {
+  const cross = Math.hypot(a[1] * b[2] - a[2] * b[1], a[2] * b[0] - a[0] * b[2], a[0] * b[1] - a[1] * b[0]);
+  return Math.atan2(cross, a[0] * b[0] + a[1] * b[1] + a[2] * b[2]);
+}
