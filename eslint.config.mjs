@@ -86,6 +86,8 @@ export default defineConfig(
         ['(^|/)server/', 'The client never imports from the server.'],
         ['^node:', 'No Node in the browser.'],
       ),
+      // Angular's validators are static functions that are handed on.
+      '@typescript-eslint/unbound-method': ['error', { ignoreStatic: true }],
       '@angular-eslint/component-selector': ['error', { type: 'element', prefix: 'fl', style: 'kebab-case' }],
       '@angular-eslint/directive-selector': [
         'error',

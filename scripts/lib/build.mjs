@@ -9,7 +9,11 @@ import { whenStale } from './stamps.mjs';
 const LOCK = 'package-lock.json';
 
 /** Programs that run by plain Node: bundled, so that a start does not compile TypeScript. */
-const SERVER_ENTRIES = ['server/main.ts', 'server/prepare.ts', 'server/plates/picture-worker.ts'];
+const SERVER_ENTRIES = [
+  'server/main.ts',
+  'server/prepare.ts',
+  { in: 'server/plates/picture-worker.ts', out: 'plates/picture-worker' },
+];
 
 /** Builds the browser's half into `dist/client`. */
 export async function buildClient() {
@@ -38,7 +42,11 @@ export async function buildClient() {
 export async function buildServer() {
   const inputs = ['server', 'shared', 'schemas', 'migrations', 'seeds', LOCK];
   await whenStale(
-    { name: 'server', inputs, outputs: ['dist/server/main.mjs', 'dist/server/prepare.mjs'] },
+    {
+      name: 'server',
+      inputs,
+      outputs: ['dist/server/main.mjs', 'dist/server/prepare.mjs', 'dist/server/plates/picture-worker.mjs'],
+    },
     () => step('Building the server', () => bundle(SERVER_ENTRIES, 'dist/server')),
   );
 }

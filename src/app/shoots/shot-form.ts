@@ -3,6 +3,7 @@ import {
   FormControl,
   FormGroup,
   type ValidationErrors,
+  type ValidatorFn,
   Validators,
 } from '@angular/forms';
 
@@ -45,8 +46,8 @@ export type ShotForm = ReturnType<typeof shotForm>;
 
 export function shotForm(shot: Shot | undefined) {
   const { rate, dropFrame, source, exposure, interval, ...rest } = shot ?? FRESH;
-  const control = <T>(value: T, validators: Validators[] = []) =>
-    new FormControl(value, { nonNullable: true, validators: validators as [] });
+  const control = <T>(value: T, validators: ValidatorFn[] = []) =>
+    new FormControl(value, { nonNullable: true, validators });
   return new FormGroup(
     {
       title: control(rest.title, [Validators.required, Validators.pattern(/\S/)]),
