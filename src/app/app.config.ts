@@ -8,7 +8,7 @@ import {
 } from '@angular/core';
 import { MAT_ICON_DEFAULT_OPTIONS, MatIconRegistry } from '@angular/material/icon';
 import { DomSanitizer } from '@angular/platform-browser';
-import { provideRouter, TitleStrategy, withComponentInputBinding } from '@angular/router';
+import { provideRouter, TitleStrategy, withComponentInputBinding, withRouterConfig } from '@angular/router';
 
 import { Session } from './account/session';
 import { routes } from './app.routes';
@@ -20,7 +20,11 @@ export const appConfig: ApplicationConfig = {
   providers: [
     provideZonelessChangeDetection(),
     provideBrowserGlobalErrorListeners(),
-    provideRouter(routes, withComponentInputBinding()),
+    provideRouter(
+      routes,
+      withComponentInputBinding(),
+      withRouterConfig({ paramsInheritanceStrategy: 'always' }),
+    ),
     // Not withFetch(): fetch tells nothing of an upload's progress.
     provideHttpClient(withInterceptors([problemInterceptor])),
     provideAppInitializer(() => {

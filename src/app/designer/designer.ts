@@ -28,7 +28,7 @@ import { ProblemNote } from '../ui/problem-note';
 import { Chart } from './chart/chart';
 import { FramedView } from './framed-view/framed-view';
 import { Hand } from './hand/hand';
-import { keystroke } from './keystrokes';
+import { keystroke, releaseClicked } from './keystrokes';
 import { Legs } from './legs/legs';
 import { PlatePictures } from './plate-pictures';
 import { DesignerSession } from './session/designer-session';
@@ -62,6 +62,7 @@ const USUAL_TEXTURE = 4096;
   styleUrl: './designer.scss',
   host: {
     class: 'fl-dark-room',
+    '(click)': 'release($event)',
     '(document:keydown)': 'press($event)',
     '(window:beforeunload)': 'warn($event)',
   },
@@ -106,6 +107,8 @@ export class Designer {
   protected press(event: KeyboardEvent): void {
     keystroke(event, { session: this.session, player: this.#player, saving: this.saving });
   }
+
+  protected readonly release = releaseClicked;
 
   protected warn(event: BeforeUnloadEvent): void {
     if (this.saving.unsaved()) event.preventDefault();

@@ -43,11 +43,22 @@ export function keystroke(event: KeyboardEvent, hands: Hands): boolean {
   const key = event.key.length === 1 ? event.key.toLowerCase() : event.key;
   const name = `${command ? 'Ctrl+' : ''}${event.shiftKey ? 'Shift+' : ''}${key}`;
   const action = Object.hasOwn(KEYSTROKES, name) ? KEYSTROKES[name] : undefined;
-  // A focused button is pressed by the space bar; elsewhere it plays.
-  if (!action || (key === ' ' && event.target instanceof HTMLButtonElement)) return false;
+  if (!action || (key === ' ' && isHeldByKeyboard(event.target))) return false;
   event.preventDefault();
   action(hands);
   return true;
+}
+
+/** A button reached by the keyboard is pressed by the space bar; one that was clicked has let go (releaseClicked). */
+function isHeldByKeyboard(target: EventTarget | null): boolean {
+  return target instanceof HTMLButtonElement || target instanceof HTMLAnchorElement;
+}
+
+/** A button that was clicked gives the keyboard back, so that space plays and arrows step at once. */
+export function releaseClicked(event: MouseEvent): void {
+  // A click made by the keyboard counts no presses of a pointer.
+  if (event.detail === 0 || !(event.target instanceof Element)) return;
+  event.target.closest('button')?.blur();
 }
 
 function isTyping(target: EventTarget | null): boolean {
