@@ -16,6 +16,7 @@ import { MatTooltipModule } from '@angular/material/tooltip';
 import { Title } from '@angular/platform-browser';
 import { Router, RouterLink } from '@angular/router';
 
+import { type Plate } from '#schemas/api/plates';
 import { framesCsv } from '#shared/export/csv';
 import { frameRows } from '#shared/export/frames-table';
 import { serialiseMove } from '#shared/document/serialise';
@@ -37,9 +38,6 @@ import { Saving } from './session/saving';
 import { openDocument, rename } from './state/commands';
 import { Player } from './transport/player';
 import { Transport } from './transport/transport';
-
-/** Texture width to load for while the graphics card has not been asked yet, pixels. */
-const USUAL_TEXTURE = 4096;
 
 /** The move designer: pictures above, legs in the middle, the key or leg in hand below. */
 @Component({
@@ -85,7 +83,13 @@ export class Designer {
   protected readonly loading = signal(true);
   protected readonly problem = signal<Problem | undefined>(undefined);
   protected readonly draft = signal<Draft | undefined>(undefined);
-  protected readonly noPlate = signal(false);
+  readonly #plates = signal<readonly Plate[]>([]);
+  /** The plate in force at the playhead: the last that stands at or before it. */
+  readonly #plateHere = computed(() => {
+    const plates = this.#plates();
+    return plates.filter(plate => plate.frame <= this.session.playhead()).at(-1) ?? plates[0];
+  });
+  protected readonly noPlate = computed(() => this.ready() && this.#plates().length === 0);
   /** Which picture has the whole width, if one has. */
   protected readonly wide = signal<'none' | 'chart' | 'view'>('none');
   protected readonly ready = computed(() => this.session.shot() !== undefined);
@@ -94,6 +98,11 @@ export class Designer {
     effect(() => {
       const [crewId, moveId] = [this.crewId(), this.moveId()];
       untracked(() => void this.#open(crewId, moveId));
+    });
+    effect(() => {
+      const plate = this.#plateHere();
+      const widest = this.framedView()?.widestPicture();
+      if (plate && widest !== undefined) untracked(() => void this.#showPlate(plate, widest));
     });
     effect(() => {
       this.session.saved();
@@ -176,6 +185,14 @@ export class Designer {
     this.draft.set(undefined);
   }
 
+  async #showPlate(plate: Plate, widest: number): Promise<void> {
+    try {
+      await this.#pictures.show(plate, widest);
+    } catch (error) {
+      this.problem.set(problemFrom(error));
+    }
+  }
+
   async #open(crewId: string, moveId: string): Promise<void> {
     this.loading.set(true);
     this.problem.set(undefined);
@@ -189,10 +206,8 @@ export class Designer {
       const draft = this.#drafts.find(moveId);
       this.session.open(document, shot, !this.#account.may(crewId, 'edit'));
       if (draft && JSON.stringify(draft.document) !== JSON.stringify(document)) this.draft.set(draft);
-      this.noPlate.set(plates.length === 0);
       this.loading.set(false);
-      if (plates.length > 0)
-        await this.#pictures.show(plates[0], this.framedView()?.largestTexture() ?? USUAL_TEXTURE);
+      this.#plates.set(plates);
     } catch (error) {
       this.problem.set(problemFrom(error));
     } finally {

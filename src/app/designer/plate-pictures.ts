@@ -1,8 +1,8 @@
 import { HttpClient } from '@angular/common/http';
-import { DestroyRef, inject, Injectable, signal } from '@angular/core';
+import { DestroyRef, inject, Injectable, signal, type WritableSignal } from '@angular/core';
 import { firstValueFrom } from 'rxjs';
 
-import { type Plate } from '#schemas/api/plates';
+import { type Plate, type PlateVersion } from '#schemas/api/plates';
 
 /** Widest plate that the chart draws: more than a screen shows. */
 const CHART_WIDTH = 4096;
@@ -15,7 +15,8 @@ const CHART_WIDTH = 4096;
 @Injectable()
 export class PlatePictures {
   readonly #http = inject(HttpClient);
-  readonly #open = new Set<ImageBitmap>();
+  /** By address: going back along a shot needs no second download. */
+  readonly #loaded = new Map<string, Promise<ImageBitmap>>();
   #plate = '';
   /** For the framed view. */
   readonly sharpest = signal<ImageBitmap | undefined>(undefined);
@@ -25,42 +26,54 @@ export class PlatePictures {
   readonly note = signal('');
 
   constructor() {
-    inject(DestroyRef).onDestroy(() => this.#open.forEach(bitmap => bitmap.close()));
+    inject(DestroyRef).onDestroy(() => {
+      for (const bitmap of this.#loaded.values()) void bitmap.then(each => each.close());
+    });
   }
 
   /**
-   * @param largestTexture the widest picture that the graphics card takes, pixels
+   * @param widest the widest picture that the graphics card takes, pixels
    * @throws Problem where a picture cannot be fetched
    */
-  async show(plate: Plate, largestTexture: number): Promise<void> {
+  async show(plate: Plate, widest: number): Promise<void> {
     if (plate.id === this.#plate) return;
     this.#plate = plate.id;
-    const byWidth = [...plate.versions]
+    const versions = plate.versions
       .filter(version => version.name !== 'thumb')
       .sort((a, b) => a.width - b.width);
-    const small = byWidth[0];
-    const sharp = byWidth.filter(version => version.width <= largestTexture).at(-1) ?? small;
-    const first = await this.#load(small.url);
-    if (this.#plate !== plate.id) return;
-    this.sharpest.set(first);
-    this.flat.set(first);
-    this.note.set(
-      sharp.width < plate.width && sharp.width < (byWidth.at(-1)?.width ?? 0)
-        ? `Shown at ${sharp.width} of ${plate.width} pixels: this graphics card takes no more.`
-        : '',
-    );
-    const chartVersion = byWidth.filter(version => version.width <= CHART_WIDTH).at(-1) ?? small;
-    if (chartVersion !== small) this.flat.set(await this.#load(chartVersion.url));
-    if (sharp !== small) {
-      const bitmap = sharp === chartVersion ? this.flat() : await this.#load(sharp.url);
-      if (this.#plate === plate.id) this.sharpest.set(bitmap);
-    }
+    const small = versions[0];
+    const flat = versions.filter(version => version.width <= CHART_WIDTH).at(-1) ?? small;
+    const sharp = versions.filter(version => version.width <= widest).at(-1) ?? small;
+    await this.#put(plate, small, [this.sharpest, this.flat]);
+    await this.#put(plate, flat, [this.flat]);
+    await this.#put(plate, sharp, [this.sharpest]);
+    const cut = sharp.width < versions[versions.length - 1].width;
+    const note = `Shown at ${sharp.width} of ${plate.width} pixels: this graphics card takes no more.`;
+    if (this.#plate === plate.id) this.note.set(cut ? note : '');
   }
 
-  async #load(url: string): Promise<ImageBitmap> {
+  /** Shows a version where it belongs, unless another plate has come into force meanwhile. */
+  async #put(
+    plate: Plate,
+    version: PlateVersion,
+    places: WritableSignal<ImageBitmap | undefined>[],
+  ): Promise<void> {
+    const bitmap = await this.#load(version.url);
+    if (this.#plate === plate.id) places.forEach(place => place.set(bitmap));
+  }
+
+  #load(url: string): Promise<ImageBitmap> {
+    const known = this.#loaded.get(url);
+    if (known) return known;
+    const loading = this.#fetch(url);
+    this.#loaded.set(url, loading);
+    // What failed may be tried again.
+    loading.catch(() => this.#loaded.delete(url));
+    return loading;
+  }
+
+  async #fetch(url: string): Promise<ImageBitmap> {
     const blob = await firstValueFrom(this.#http.get(url, { responseType: 'blob' }));
-    const bitmap = await createImageBitmap(blob, { colorSpaceConversion: 'none', premultiplyAlpha: 'none' });
-    this.#open.add(bitmap);
-    return bitmap;
+    return createImageBitmap(blob, { colorSpaceConversion: 'none', premultiplyAlpha: 'none' });
   }
 }

@@ -175,7 +175,7 @@ function traceSegment(
   view: ChartView,
   size: ChartSize,
 ): void {
-  if (!from) return;
+  if (!from || to.cut) return;
   traceLine(context, from.lonDeg, from.latDeg, to.lonDeg, to.latDeg, view, size);
 }
 

@@ -27,6 +27,9 @@ const ZOOM_PER_PIXEL = 1.0015;
 /** How long after the last turn of the wheel a zoom of a key counts as done. */
 const WHEEL_ENDS_MS = 250;
 
+/** Without a framed view the chart alone needs a picture. */
+const CHART_ONLY = 4096;
+
 interface Grip {
   readonly pointer: number;
   readonly world: Float64Array;
@@ -77,7 +80,10 @@ export class FramedView {
     const w = Math.floor(Math.min(width, height / this.heightPerWidth()));
     return { width: w, height: Math.round(w * this.heightPerWidth()) };
   });
-  readonly largestTexture = computed(() => this.#renderer()?.largestTexture);
+  /** The widest picture worth loading, pixels; unknown until the graphics card has been asked. */
+  readonly widestPicture = computed(
+    () => this.#renderer()?.largestTexture ?? (this.failure() ? CHART_ONLY : undefined),
+  );
 
   constructor() {
     afterNextRender(() => void this.#start());

@@ -40,7 +40,7 @@ void main() {
   vec3 down = dFdy(n);
   float step = max(dot(across, across), dot(down, down));
   float level = 0.5 * log2(max(step, 1e-20)) + log2(texelsPerRadian) - 0.5;
-  vec2 at = vec2(atan(n.x, -n.z) * 0.5 * INV_PI + 0.5, 0.5 - asin(clamp(n.y, -1.0, 1.0)) * INV_PI);
+  vec2 at = vec2(atan(n.x, -n.z) * 0.5 * INV_PI + 0.5, 0.5 - atan(n.y, length(n.xz)) * INV_PI);
   colour = vec4(textureLod(plate, at, max(level, 0.0)).rgb, 1.0);
 }
 `;

@@ -7,7 +7,7 @@ import { shotTimes } from '#shared/document/shot-times';
 import { compileMove } from '#shared/path/compile';
 import { POSE_SIZE } from '#shared/path/compiled-move';
 import { quatFromYawPitchRoll } from '#shared/rotation/yaw-pitch-roll';
-import { type Command, keyAt, type Look } from '../state/commands';
+import { type Command, keyAt, keySelection, type Look } from '../state/commands';
 import {
   type EditorState,
   NOTHING_SELECTED,
@@ -58,7 +58,7 @@ export class DesignerSession {
   );
   readonly selection = computed(() => this.#preview()?.selection ?? this.#state().selection);
   readonly undoLabel = computed(() => this.#state().past.at(-1)?.label);
-  readonly redoLabel = computed(() => this.#state().future[0]?.label);
+  readonly redoLabel = computed(() => this.#state().future.at(0)?.label);
 
   readonly times = computed(() => shotTimes(this.move().shot));
   readonly compiled = computed(() => compileMove(this.move()));
@@ -84,12 +84,13 @@ export class DesignerSession {
   readonly pose = computed(() => poseOf(this.look()));
 
   open(document: MoveDocument, shot: Shot, readOnly: boolean): void {
-    this.#state.set(openState(document));
+    const opened = openState(document);
+    this.#state.set(select(opened, keySelection(document.keys[0].frame)));
     this.#preview.set(undefined);
     this.#shot.set(shot);
     this.readOnly.set(readOnly);
     this.hand.set(undefined);
-    this.playhead.set(this.times().from);
+    this.playhead.set(document.keys[0].frame);
   }
 
   /** The numbers of the path at a source frame. */
