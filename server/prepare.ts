@@ -3,7 +3,7 @@ import { setTimeout as sleep } from 'node:timers/promises';
 import { type Knex } from 'knex';
 import { seedDemo } from '../seeds/demo';
 import { type DemoPictures } from '../seeds/demo-plates';
-import { sketchHarbour } from '../seeds/harbour-sketch';
+import { paintVesperHaven } from '../seeds/vesper-haven/paint';
 import { type Config, readConfig } from './config';
 import { connect } from './db/connect';
 import { databaseFailure } from './db/failures';
@@ -41,7 +41,7 @@ async function prepare(): Promise<void> {
 
 function demoPictures({ pictureWorker, storageDir }: Config): DemoPictures {
   return {
-    paint: sketchHarbour,
+    paint: paintVesperHaven,
     reader: new PictureReader(pictureWorker),
     storage: new LocalStorage(objectsFolder(storageDir)),
     temporaryFolder: path.join(storageDir, 'tmp'),
