@@ -88,17 +88,19 @@ function lampPools(east: number, south: number): number {
   return light * 1.85;
 }
 
+/** Headings of the tripod's legs, radians. */
+const LEGS = [0.3, 0.3 + (2 * Math.PI) / 3, 0.3 - (2 * Math.PI) / 3];
+
 /** The tripod: three legs from under the camera, and the dark where they meet. */
 function tripodShade(east: number, south: number): number {
   const r = Math.hypot(east, south);
   if (r > 0.75) return 1;
   const angle = Math.atan2(east, -south);
-  const leg = Math.min(
-    ...[0.3, 0.3 + 2.0944, 0.3 - 2.0944].map(
-      a => Math.abs(Math.sin(angle - a)) * r + (Math.cos(angle - a) < 0 ? 9 : 0),
-    ),
-  );
-  const legs = r < 0.56 ? 1 - 0.93 * Math.exp(-((leg / 0.016) ** 2)) : 1;
+  let nearest = Infinity;
+  for (const leg of LEGS) {
+    if (Math.cos(angle - leg) > 0) nearest = Math.min(nearest, Math.abs(Math.sin(angle - leg)) * r);
+  }
+  const legs = r < 0.56 ? 1 - 0.93 * Math.exp(-((nearest / 0.016) ** 2)) : 1;
   const hub = 1 - 0.95 * Math.exp(-((r / 0.085) ** 4));
   return legs * hub * (1 - 0.4 * Math.exp(-((r / 0.3) ** 2)));
 }
