@@ -4,7 +4,7 @@ import { type Locator, type Page } from '@playwright/test';
 import { parse } from 'csv-parse/sync';
 
 import { checkMove } from '../../shared/document/validate';
-import { expect, numberField, openShot, signIn, test, typeNumber } from './support/person';
+import { expect, makeShot, numberField, openShot, signIn, test, typeNumber } from './support/person';
 
 /** A real panorama; its source is in test/fixtures/README.md. */
 const PHOTOGRAPH = 'test/fixtures/panos/hill-2048x1024.jpg';
@@ -124,16 +124,7 @@ test('an operator keys a move on the sample plate, plays it, saves it and takes 
 
 test('an operator does the same on a photograph of their own', async ({ page }) => {
   await signIn(page, 'operator');
-  await page.getByRole('button', { name: 'New shoot' }).click();
-  await page.getByLabel('Title').fill('A walk uphill');
-  await page.getByRole('button', { name: 'Save' }).click();
-  await expect(page.getByRole('heading', { level: 1, name: 'A walk uphill' })).toBeVisible();
-  await page.getByRole('button', { name: 'New shot' }).click();
-  await page.getByLabel('Title').fill('From the top');
-  await page.getByRole('button', { name: 'Save' }).click();
-  await expect(page.getByRole('heading', { level: 1, name: 'From the top' })).toBeVisible();
-  await page.getByLabel('Panorama to upload as a plate').setInputFiles(PHOTOGRAPH);
-  await expect(page.getByRole('img', { name: 'hill-2048x1024.jpg' })).toBeVisible();
+  await makeShot(page, 'A walk uphill', 'From the top', PHOTOGRAPH);
   await doTheMainJob(page);
 });
 

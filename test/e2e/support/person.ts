@@ -1,3 +1,5 @@
+import path from 'node:path';
+
 import { expect, type Page, test as base } from '@playwright/test';
 
 /** Accounts of the demo crew (seeds/demo-crew.ts). */
@@ -42,6 +44,20 @@ export async function openShot(page: Page, shoot: string, shot: string): Promise
   await page.getByRole('link', { name: shoot }).click();
   await page.getByRole('link', { name: shot }).click();
   await expect(page.getByRole('heading', { level: 1, name: shot })).toBeVisible();
+}
+
+/** Makes a shoot with one shot and uploads a picture as its plate, as a person does; ends on the shot's page. */
+export async function makeShot(page: Page, shoot: string, shot: string, picture: string): Promise<void> {
+  await page.getByRole('button', { name: 'New shoot' }).click();
+  await page.getByLabel('Title').fill(shoot);
+  await page.getByRole('button', { name: 'Save' }).click();
+  await expect(page.getByRole('heading', { level: 1, name: shoot })).toBeVisible();
+  await page.getByRole('button', { name: 'New shot' }).click();
+  await page.getByLabel('Title').fill(shot);
+  await page.getByRole('button', { name: 'Save' }).click();
+  await expect(page.getByRole('heading', { level: 1, name: shot })).toBeVisible();
+  await page.getByLabel('Panorama to upload as a plate').setInputFiles(picture);
+  await expect(page.getByRole('img', { name: path.basename(picture) })).toBeVisible();
 }
 
 /** The numbers of the key in hand, as the fields show them. */

@@ -60,7 +60,7 @@ export class FramedView {
   protected readonly canvasElement = viewChild.required<ElementRef<HTMLCanvasElement>>('canvas');
   protected readonly boxElement = viewChild.required<ElementRef<HTMLElement>>('box');
   readonly #renderer = signal<FramedRenderer | undefined>(undefined);
-  readonly #size = signal({ width: 0, height: 0 });
+  readonly #place = signal({ left: 0, top: 0, width: 0, height: 0 });
   readonly #pointers = new Map<number, PicturePoint>();
   #grip: Grip | undefined;
   #pinch: Pinch | undefined;
@@ -76,9 +76,13 @@ export class FramedView {
   });
   /** The largest frame of the deliverable's shape that fits, CSS pixels. */
   protected readonly frame = computed(() => {
-    const { width, height } = this.#size();
-    const w = Math.floor(Math.min(width, height / this.heightPerWidth()));
-    return { width: w, height: Math.round(w * this.heightPerWidth()) };
+    const place = this.#place();
+    const width = Math.floor(Math.min(place.width, place.height / this.heightPerWidth()));
+    const height = Math.round(width * this.heightPerWidth());
+    // On whole pixels of the screen: half a pixel aside the browser would blur the picture.
+    const left = onPixel(place.left + (place.width - width) / 2) - place.left;
+    const top = onPixel(place.top + (place.height - height) / 2) - place.top;
+    return { width, height, left, top };
   });
   /** The widest picture worth loading, pixels; unknown until the graphics card has been asked. */
   readonly widestPicture = computed(
@@ -186,11 +190,9 @@ export class FramedView {
   }
 
   async #start(): Promise<void> {
-    const observer = new ResizeObserver(([entry]) => {
-      const { width, height } = entry.contentRect;
-      this.#size.set({ width, height });
-    });
-    observer.observe(this.boxElement().nativeElement);
+    const box = this.boxElement().nativeElement;
+    const observer = new ResizeObserver(() => this.#place.set(box.getBoundingClientRect()));
+    observer.observe(box);
     const canvas = this.canvasElement().nativeElement;
     // three.js restores its own state; what we must do is draw again.
     canvas.addEventListener('webglcontextrestored', () => this.#drawSoon());
@@ -227,6 +229,10 @@ export class FramedView {
     const level = this.session.shot()?.level ?? [0, 0, 0, 1];
     renderer.draw(this.session.pose(), level, this.heightPerWidth());
   }
+}
+
+function onPixel(position: number): number {
+  return Math.round(position * window.devicePixelRatio) / window.devicePixelRatio;
 }
 
 function between(a: PicturePoint, b: PicturePoint): { spread: number; tilt: number } {

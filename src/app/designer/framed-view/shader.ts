@@ -31,6 +31,17 @@ vec3 turn(vec4 q, vec3 v) {
   return v + q.w * t + cross(q.xyz, t);
 }
 
+// The graphics language promises no precision for its own atan; this is good to 2e-8 (Abramowitz & Stegun, 4.4.49).
+float arcTangent(float y, float x) {
+  float a = min(abs(x), abs(y)) / max(max(abs(x), abs(y)), 1e-20);
+  float s = a * a;
+  float r = ((((((((0.0028662257 * s - 0.0161657367) * s + 0.0429096138) * s - 0.0752896400) * s + 0.1065626393) * s
+    - 0.1420889944) * s + 0.1999355085) * s - 0.3333314528) * s + 1.0) * a;
+  r = abs(y) > abs(x) ? 1.57079632679 - r : r;
+  r = x < 0.0 ? 3.14159265359 - r : r;
+  return y < 0.0 ? -r : r;
+}
+
 void main() {
   float a = 1.0 + eye;
   float squared = dot(plane, plane);
@@ -40,7 +51,7 @@ void main() {
   vec3 down = dFdy(n);
   float step = max(dot(across, across), dot(down, down));
   float level = 0.5 * log2(max(step, 1e-20)) + log2(texelsPerRadian) - 0.5;
-  vec2 at = vec2(atan(n.x, -n.z) * 0.5 * INV_PI + 0.5, 0.5 - atan(n.y, length(n.xz)) * INV_PI);
+  vec2 at = vec2(arcTangent(n.x, -n.z) * 0.5 * INV_PI + 0.5, 0.5 - arcTangent(n.y, length(n.xz)) * INV_PI);
   colour = vec4(textureLod(plate, at, max(level, 0.0)).rgb, 1.0);
 }
 `;
