@@ -6,6 +6,7 @@ import {
   provideBrowserGlobalErrorListeners,
   provideZonelessChangeDetection,
 } from '@angular/core';
+import { MAT_FORM_FIELD_DEFAULT_OPTIONS } from '@angular/material/form-field';
 import { MAT_ICON_DEFAULT_OPTIONS, MatIconRegistry } from '@angular/material/icon';
 import { DomSanitizer } from '@angular/platform-browser';
 import { provideRouter, TitleStrategy, withComponentInputBinding, withRouterConfig } from '@angular/router';
@@ -32,6 +33,11 @@ export const appConfig: ApplicationConfig = {
       return inject(Session).load();
     }),
     { provide: TitleStrategy, useClass: PageTitle },
+    // In the filled look a dense field has no room for its label once it holds something.
+    {
+      provide: MAT_FORM_FIELD_DEFAULT_OPTIONS,
+      useValue: { appearance: 'outline', subscriptSizing: 'dynamic' },
+    },
     { provide: MAT_ICON_DEFAULT_OPTIONS, useValue: { fontSet: '' } },
   ],
 };

@@ -144,6 +144,33 @@ test('a picture that is not 2:1 is refused with its size, and nothing is kept', 
   await expect(page.locator('.plates li')).toHaveCount(plates);
 });
 
+test('a bad document is listed fault by fault and replaces nothing; a good one is one step that can be undone', async ({
+  page,
+}) => {
+  await signIn(page, 'operator');
+  await openShot(page, 'harbour by night', 'Quay at blue hour');
+  await page.getByRole('link', { name: 'Quay, one turn with a dip', exact: true }).click();
+  const title = page.getByLabel('Title of the move');
+  await expect(title).toHaveValue('Quay, one turn with a dip');
+  const example = JSON.parse(await readFile('test/fixtures/quay-one-turn.move.json', 'utf8'));
+  const open = (document: unknown) =>
+    page.getByLabel('Move document to open').setInputFiles({
+      name: 'other.move.json',
+      mimeType: 'application/json',
+      buffer: Buffer.from(JSON.stringify(document)),
+    });
+  await open({ ...example, keys: [example.keys[1], example.keys[0], { ...example.keys[2], fov: 400 }] });
+  await expect(page.getByRole('alert')).toContainText('/keys/1/frame must be after frame 720');
+  await expect(page.getByRole('alert')).toContainText('/keys/2/fov');
+  await expect(page.getByTestId('save-state')).toHaveText('saved');
+  await open({ ...example, title: 'Another', keys: example.keys.slice(2) });
+  await expect(title).toHaveValue('Another');
+  await expect(page.getByRole('button', { name: /^Key \d+ at frame/ })).toHaveCount(1);
+  await page.getByRole('button', { name: 'Undo' }).click();
+  await expect(title).toHaveValue('Quay, one turn with a dip');
+  await expect(page.getByTestId('save-state')).toHaveText('saved');
+});
+
 test('an editor sees and downloads, and is offered no change', async ({ page }) => {
   await signIn(page, 'editor');
   await openShot(page, 'harbour by night', 'Quay at blue hour');

@@ -205,7 +205,7 @@ export class Designer {
       const document = this.saving.opened(move);
       const draft = this.#drafts.find(moveId);
       this.session.open(document, shot, !this.#account.may(crewId, 'edit'));
-      if (draft && JSON.stringify(draft.document) !== JSON.stringify(document)) this.draft.set(draft);
+      if (draft && serialiseMove(draft.document) !== serialiseMove(document)) this.draft.set(draft);
       this.loading.set(false);
       this.#plates.set(plates);
     } catch (error) {

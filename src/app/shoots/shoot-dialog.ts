@@ -63,7 +63,7 @@ export interface ShootDialogData {
   styles: `
     mat-dialog-content {
       display: grid;
-      gap: 0.25rem;
+      gap: 0.875rem;
       width: min(30rem, 80vw);
       padding-top: 0.5rem !important;
     }

@@ -2,6 +2,7 @@ import { computed, inject, Injectable, signal } from '@angular/core';
 
 import { type Move } from '#schemas/api/moves';
 import { type MoveDocument } from '#schemas/move';
+import { serialiseMove } from '#shared/document/serialise';
 import { checkMove } from '#shared/document/validate';
 import { Problem, problemFrom } from '../../http/problem';
 import { ShotsApi } from '../../shots/shots-api';
@@ -111,5 +112,5 @@ function isMove(value: unknown): value is Move {
 }
 
 function same(a: MoveDocument, b: MoveDocument): boolean {
-  return JSON.stringify(a) === JSON.stringify(b);
+  return serialiseMove(a) === serialiseMove(b);
 }
