@@ -1,5 +1,6 @@
 import { type MoveDraft, type MoveSummary } from '#schemas/api/moves';
 import { type MoveDocument } from '#schemas/move';
+import { newMove } from '#shared/document/new-move';
 import { checkMove } from '#shared/document/validate';
 import { type CrewScope } from '../crews/crew-scope';
 import { uuidV7 } from '../db/uuid-v7';
@@ -7,9 +8,7 @@ import { invalid, notFound, revisionConflict } from '../http/problem';
 import { documentShot } from '../shots/shot-facts';
 import { holdShot } from '../shots/shots-db';
 import { seeShot } from '../shots/shots-service';
-import { freshMove } from './fresh-move';
 import { findMove, insertMove, listMoves, type StoredMove, updateMove } from './moves-db';
-import { nestingFault } from './nesting';
 
 /** @throws Problem 404 for the shot */
 export async function seeMoves(scope: CrewScope, shotId: string): Promise<MoveSummary[]> {
@@ -43,7 +42,7 @@ export async function createMove(scope: CrewScope, shotId: string, draft: MoveDr
 
 async function freshDocument(trx: CrewScope, shotId: string, draft: MoveDraft): Promise<MoveDocument> {
   const title = 'title' in draft ? draft.title : '';
-  return freshMove(documentShot(await seeShot(trx, shotId)), title);
+  return newMove(documentShot(await seeShot(trx, shotId)), title);
 }
 
 /** @throws Problem 404; 422 with every fault; 412 with the move as it is where somebody was first */
@@ -71,8 +70,7 @@ export async function deleteMove(scope: CrewScope, id: string): Promise<void> {
 
 /** Pointers are into the body, where the document stands. */
 function sound(value: object): MoveDocument {
-  const tooDeep = nestingFault(value);
-  const checked = tooDeep ? { ok: false as const, faults: [tooDeep] } : checkMove(value);
+  const checked = checkMove(value);
   if (checked.ok) return checked.document;
   throw invalid(
     checked.faults.map(({ pointer, detail }) => ({ pointer: `/document${pointer}`, detail })),

@@ -6,21 +6,58 @@ import { type Fault, pointerTo, shown, valueAt } from './fault';
  *
  * @param root the value that was validated
  * @param errors all of a validator's errors
- * @returns one fault for each thing wrong: of a choice (`anyOf`) the choice's own fault, not each branch's
+ * @returns one fault for each thing wrong: of a choice (`anyOf`) what tells most, not each branch's refusal
  */
 export function schemaFaults(root: unknown, errors: readonly SchemaFault[]): Fault[] {
-  const choices = errors.filter(error => error.keyword === 'anyOf');
-  const inBranch = (error: SchemaFault) =>
-    choices.some(choice => error !== choice && error.schemaPath.startsWith(`${choice.schemaPath}/`));
-  const explained = (choice: SchemaFault) =>
-    errors.some(error => inBranch(error) && error.instancePath.startsWith(`${choice.instancePath}/`));
-  return errors
-    .filter(error => {
-      if (error.keyword === 'anyOf') return !explained(error);
-      const choice = choices.find(each => error.schemaPath.startsWith(`${each.schemaPath}/`));
-      return !choice || error.instancePath.length > choice.instancePath.length;
-    })
-    .map(error => sentence(root, error));
+  const choices = new Map<string, Choice>();
+  for (const error of errors) {
+    if (error.keyword === 'anyOf')
+      choices.set(placeOf(error.instancePath, error.schemaPath), { error, refusals: [] });
+  }
+  const alone = errors.filter(error => {
+    const choice = error.keyword === 'anyOf' ? undefined : choiceAround(choices, error);
+    choice?.refusals.push(error);
+    return !choice && error.keyword !== 'anyOf';
+  });
+  return [
+    ...alone.map(error => sentence(root, error)),
+    ...[...choices.values()].flatMap(choice => choiceFaults(root, choice)),
+  ];
+}
+
+/** A choice that no branch of it allowed, and why each refused. */
+interface Choice {
+  readonly error: SchemaFault;
+  readonly refusals: SchemaFault[];
+}
+
+function placeOf(instancePath: string, schemaPath: string): string {
+  return `${instancePath}\n${schemaPath}`;
+}
+
+/** @returns the innermost choice that an error is a branch's refusal of */
+function choiceAround(choices: ReadonlyMap<string, Choice>, error: SchemaFault): Choice | undefined {
+  const end = error.schemaPath.lastIndexOf('/anyOf/');
+  if (end < 0) return undefined;
+  const schemaPath = error.schemaPath.slice(0, end + '/anyOf'.length);
+  for (let path = error.instancePath; ; path = path.slice(0, path.lastIndexOf('/'))) {
+    const choice = choices.get(placeOf(path, schemaPath));
+    if (choice || path === '') return choice;
+  }
+}
+
+/** A branch that was wrong further in, or only in the value's size, is the one that was meant. */
+function choiceFaults(root: unknown, { error, refusals }: Choice): Fault[] {
+  const inside = refusals.filter(refusal => refusal.instancePath !== error.instancePath);
+  if (inside.length > 0) return inside.map(refusal => sentence(root, refusal));
+  const given = shown(valueAt(root, error.instancePath));
+  const must = (what: string): Fault[] => [
+    { pointer: error.instancePath, detail: `must be ${what}, is ${given}` },
+  ];
+  if (error.schemaPath.endsWith('/ease/anyOf')) return must(EASES);
+  const fitting = refusals.filter(({ keyword }) => keyword !== 'type');
+  if (fitting.length > 0) return fitting.map(refusal => sentence(root, refusal));
+  return must(refusals.map(({ params }) => typeName(params['type'])).join(' or '));
 }
 
 const TYPE_NAMES: Readonly<Record<string, string>> = {
@@ -31,6 +68,10 @@ const TYPE_NAMES: Readonly<Record<string, string>> = {
   object: 'an object',
   array: 'a list',
 };
+
+function typeName(type: unknown): string {
+  return TYPE_NAMES[String(type)] ?? String(type);
+}
 
 const EASES = '"fair", "linear", "hold", a CSS easing keyword or {"bezier": [x1, y1, x2, y2]}';
 
@@ -47,13 +88,11 @@ function sentence(root: unknown, { keyword, instancePath, params }: SchemaFault)
         member('additionalProperty'),
       );
     case 'type':
-      return at(`must be ${TYPE_NAMES[String(params['type'])] ?? String(params['type'])}, is ${given}`);
+      return at(`must be ${typeName(params['type'])}, is ${given}`);
     case 'const':
       return at(`must be ${shown(params['allowedValue'])}, is ${given}`);
     case 'enum':
       return at(`must be one of ${list(params['allowedValues'])}, is ${given}`);
-    case 'anyOf':
-      return at(`must be ${EASES}, is ${given}`);
     case 'minimum':
     case 'maximum':
     case 'exclusiveMinimum':
@@ -92,7 +131,9 @@ function atMost(keyword: string): string {
 function lengthOf(root: unknown, pointer: string): number {
   const value = valueAt(root, pointer);
   if (Array.isArray(value)) return value.length;
-  return typeof value === 'string' ? Array.from(value).length : 0;
+  let signs = 0;
+  if (typeof value === 'string') for (const _sign of value) signs++;
+  return signs;
 }
 
 function list(values: unknown): string {

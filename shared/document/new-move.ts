@@ -1,7 +1,7 @@
-import { type MoveDocument } from '#schemas/move';
+import { type MoveDocument, type Shot } from '#schemas/move';
 
-/** A move of one still key at the delivered range's first frame, looking ahead. */
-export function freshMove(shot: MoveDocument['shot'], title: string): MoveDocument {
+/** A move of one still key at the delivered range's first frame, level and looking ahead. */
+export function newMove(shot: Shot, title: string): MoveDocument {
   return {
     format: 'fairlead.move',
     version: 1,
