@@ -1,5 +1,5 @@
 import { UnknownDeliverable } from '#shared/export/frames-table';
-import { ReaderGone } from './output';
+import { oneLine, ReaderGone } from './output';
 import { UsageError } from './usage';
 
 type Verb = (args: readonly string[]) => number | Promise<number>;
@@ -24,7 +24,7 @@ try {
 } catch (error) {
   if (error instanceof ReaderGone) process.exitCode = 0;
   else if (error instanceof UsageError || error instanceof UnknownDeliverable) {
-    process.stderr.write(`${error.message}\n`);
+    process.stderr.write(`${oneLine(error.message)}\n`);
     process.exitCode = 2;
   } else throw error;
 }

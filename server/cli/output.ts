@@ -23,6 +23,16 @@ export function print(pieces: Iterable<string>): void {
   writeAll(waiting);
 }
 
+/**
+ * Text as one line for people and scripts: what a document says may hold line ends and control signs, which would break
+ * a list of lines or steer a terminal.
+ */
+export function oneLine(text: string): string {
+  return text.replace(/[\p{Cc}\u2028\u2029]/gu, sign =>
+    sign === '\n' ? '\\n' : `\\u${sign.charCodeAt(0).toString(16).padStart(4, '0')}`,
+  );
+}
+
 function writeAll(text: string): void {
   const bytes = Buffer.from(text, 'utf8');
   let done = 0;

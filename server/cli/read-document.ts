@@ -10,7 +10,7 @@ import { UsageError } from './usage';
  * @throws UsageError where it cannot be read or is not JSON
  */
 export function readJson(file: string): unknown {
-  const name = file === '-' ? 'standard input' : file;
+  const name = nameOf(file);
   let text: string;
   try {
     text = readFileSync(file === '-' ? 0 : file, 'utf8');
@@ -24,6 +24,10 @@ export function readJson(file: string): unknown {
   }
 }
 
+function nameOf(file: string): string {
+  return file === '-' ? 'standard input' : file;
+}
+
 /** @throws UsageError where the file is no valid move document: its first fault, and how many there are */
 export function readMove(file: string): MoveDocument {
   const checked = checkMove(readJson(file));
@@ -31,5 +35,7 @@ export function readMove(file: string): MoveDocument {
   const [first] = checked.faults;
   const more =
     checked.faults.length > 1 ? ` (and ${checked.faults.length - 1} more; see: check ${file})` : '';
-  throw new UsageError(`${file} is not a valid move document: ${first.pointer}: ${first.detail}${more}`);
+  throw new UsageError(
+    `${nameOf(file)} is not a valid move document: ${first.pointer}: ${first.detail}${more}`,
+  );
 }

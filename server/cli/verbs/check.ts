@@ -1,5 +1,5 @@
 import { checkMove } from '#shared/document/validate';
-import { print } from '../output';
+import { oneLine, print } from '../output';
 import { readJson } from '../read-document';
 import { readWords } from '../usage';
 
@@ -11,6 +11,6 @@ export function check(args: readonly string[]): number {
     print(['ok\n']);
     return 0;
   }
-  print(checked.faults.map(fault => `${fault.pointer}: ${fault.detail}\n`));
+  print(checked.faults.map(fault => `${oneLine(`${fault.pointer}: ${fault.detail}`)}\n`));
   return 1;
 }
