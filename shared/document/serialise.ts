@@ -1,27 +1,18 @@
-import { type Deliverable, type Key, type MoveDocument, type Shot } from '#schemas/move';
+import { type MoveDocument } from '#schemas/move';
+import { type SavedMove } from '#schemas/saved-move';
 
-/** The members of each part in the order that FORMATS shows them: a document reads the same whoever wrote it. */
+/** The members of each part in the order of the format's description: a document reads the same whoever wrote it. */
 const ORDER = {
-  document: ['format', 'version', 'title', 'notes', 'shot', 'deliverables', 'keys', 'extensions'],
+  document: [
+    ...['format', 'version', 'title', 'notes', 'author', 'licence', 'tags', 'usual', 'turns'],
+    ...['shot', 'deliverables', 'keys', 'extensions'],
+  ],
   shot: [
-    ...[
-      'title',
-      'rate',
-      'frames',
-      'speed',
-      'from',
-      'to',
-      'start',
-      'dropFrame',
-      'source',
-      'level',
-      'seamYaw',
-      'loops',
-    ],
-    ...['exposure', 'interval', 'extensions'],
+    ...['title', 'rate', 'frames', 'speed', 'from', 'to', 'start', 'dropFrame', 'source', 'level', 'seamYaw'],
+    ...['loops', 'exposure', 'interval', 'extensions'],
   ],
   deliverable: ['name', 'width', 'height', 'match', 'extensions'],
-  key: ['frame', 'yaw', 'pitch', 'roll', 'fov', 'eye', 'rest', 'leg', 'extensions'],
+  key: ['frame', 'at', 'yaw', 'pitch', 'roll', 'fov', 'eye', 'rest', 'leg', 'extensions'],
 } as const satisfies Record<string, readonly string[]>;
 
 /**
@@ -30,26 +21,30 @@ const ORDER = {
  * @returns JSON that parses to an equal document; no −0
  */
 export function serialiseMove(document: MoveDocument): string {
+  return serialised(document, { ...listsOf(document), shot: line(document.shot, ORDER.shot) });
+}
+
+/** A saved move as text. @see serialiseMove */
+export function serialiseSavedMove(saved: SavedMove): string {
+  return serialised(saved, listsOf(saved));
+}
+
+/** @param written the members that do not fit on one line, as text */
+function serialised(document: object, written: Readonly<Record<string, string>>): string {
   const members = ordered(document, ORDER.document).map(
-    ([name, value]) => `  ${quote(name)}: ${member(name, value, document)}`,
+    ([name, value]) => `  ${quote(name)}: ${written[name] ?? quote(value)}`,
   );
   return `{\n${members.join(',\n')}\n}\n`;
 }
 
-function member(name: string, value: unknown, document: MoveDocument): string {
-  switch (name) {
-    case 'keys':
-      return lines(document.keys.map(key => line(key, ORDER.key)));
-    case 'deliverables':
-      return lines(document.deliverables.map(each => line(each, ORDER.deliverable)));
-    case 'shot':
-      return line(document.shot, ORDER.shot);
-    default:
-      return quote(value);
-  }
+function listsOf({ keys, deliverables }: { keys: readonly object[]; deliverables: readonly object[] }) {
+  return {
+    keys: lines(keys.map(key => line(key, ORDER.key))),
+    deliverables: lines(deliverables.map(each => line(each, ORDER.deliverable))),
+  };
 }
 
-function line(part: Key | Deliverable | Shot, order: readonly string[]): string {
+function line(part: object, order: readonly string[]): string {
   return `{ ${ordered(part, order)
     .map(([name, value]) => `${quote(name)}: ${spaced(value)}`)
     .join(', ')} }`;
