@@ -68,6 +68,7 @@ export async function bundle(entries, outdir, options = {}) {
     platform: 'node',
     format: 'esm',
     target: 'node20',
+    minifySyntax: true,
     packages: 'external',
     sourcemap: true,
     outExtension: { '.js': '.mjs' },

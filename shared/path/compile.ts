@@ -2,6 +2,7 @@ import { type Key, type MoveDocument } from '#schemas/move';
 import { RAD_PER_DEG } from '#shared/conventions';
 import { dot } from '#shared/rotation/quaternion';
 import { CompiledMove, type CompiledRun } from './compiled-move';
+import { easeTables } from './ease-table';
 import * as at from './leg-table';
 import { orientationOnLeg } from './orientation';
 import { fairRuns } from './runs';
@@ -34,7 +35,7 @@ export function compileMove(document: Pick<MoveDocument, 'keys'>): CompiledMove 
     return { ...run, fellBack: written.fellBack };
   });
   carrySigns(table, sorts, flags);
-  return new CompiledMove(keys, table, sorts, flags, runs);
+  return new CompiledMove(keys, table, sorts, flags, runs, easeTables(keys, table, flags));
 }
 
 /** The last key has no leg: its row holds its pose for what comes after. */
@@ -50,11 +51,14 @@ function writeRow(table: Float64Array, leg: number, key: Key, next: Key | undefi
 function carrySigns(table: Float64Array, sorts: Uint8Array, flags: Uint8Array): void {
   const end = new Float64Array(4);
   const start = new Float64Array(4);
+  const place = new Float64Array(1);
   for (let leg = 0; leg < sorts.length; leg++) {
     const row = leg * at.ROW;
-    orientationOnLeg(start, table, row, sorts[leg], flags[leg], 0);
+    place[0] = 0;
+    orientationOnLeg(start, table, row, sorts[leg], flags[leg], place);
     if (leg > 0 && dot(end, start) < 0) flip(table, row, sorts[leg]);
-    orientationOnLeg(end, table, row, sorts[leg], flags[leg], 1);
+    place[0] = 1;
+    orientationOnLeg(end, table, row, sorts[leg], flags[leg], place);
   }
 }
 

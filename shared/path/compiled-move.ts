@@ -1,14 +1,10 @@
 import { type Key } from '#schemas/move';
 import { type Numbers } from '#shared/conventions';
-import {
-  clampFovRad,
-  FOV_ALWAYS_DRAWN_RAD,
-  FOV_MIN_RAD,
-  fovFromZoom,
-} from '#shared/projection/field-of-view';
 import { AngleColumns } from './angle-columns';
 import { bezierHeight, bezierParameter } from './ease';
+import { easeFromTable, type EaseTables } from './ease-table';
 import * as at from './leg-table';
+import { lensOnLeg } from './lens-on-leg';
 import { orientationOnLeg } from './orientation';
 import { type Run } from './runs';
 
@@ -35,6 +31,9 @@ export class CompiledMove {
   readonly lastKey: number;
   readonly #frames: Float64Array;
   readonly #columns: AngleColumns;
+  readonly #eases: Readonly<Float64Array>;
+  readonly #easeStarts: Readonly<Int32Array>;
+  readonly #place = new Float64Array(1);
   #leg = 0;
 
   /** Made by `compileMove`; rows, sorts and flags as leg-table.ts says, one a key, the last key's holding its pose. */
@@ -44,8 +43,11 @@ export class CompiledMove {
     readonly sorts: Readonly<Uint8Array>,
     readonly flags: Readonly<Uint8Array>,
     readonly runs: readonly CompiledRun[],
+    eases: EaseTables,
   ) {
     this.#frames = Float64Array.from(keys, key => key.frame);
+    this.#eases = eases.tables;
+    this.#easeStarts = eases.starts;
     this.lastKey = keys.length - 1;
     this.firstFrame = this.#frames[0];
     this.lastFrame = this.#frames[this.lastKey];
@@ -61,17 +63,9 @@ export class CompiledMove {
   poseAt(out: Numbers, frame: number): Numbers {
     const leg = this.legAt(frame);
     const row = leg * at.ROW;
-    const flags = this.flags[leg];
-    const table = this.table;
-    const s = this.progress(leg, frame);
-    orientationOnLeg(out, table, row, this.sorts[leg], flags, s);
-    const eye = Math.min(Math.max(at.cubic(table, row + at.EYE, s), 0), 1);
-    const fov =
-      (flags & at.ZOOMS) === 0 || s === 0
-        ? table[row + at.FOV]
-        : fovFromZoom(at.cubic(table, row + at.ZOOM, s));
-    out[4] = fov < FOV_MIN_RAD || fov > FOV_ALWAYS_DRAWN_RAD ? clampFovRad(fov, eye) : fov;
-    out[5] = eye;
+    this.#findProgress(leg, frame);
+    orientationOnLeg(out, this.table, row, this.sorts[leg], this.flags[leg], this.#place);
+    lensOnLeg(out, this.table, row, this.flags[leg], this.#place);
     return out;
   }
 
@@ -115,13 +109,22 @@ export class CompiledMove {
 
   /** @returns how far along a leg a frame is: the ease's u on eased legs, the share of time on fair ones; 0…1 */
   progress(leg: number, frame: number): number {
+    this.#findProgress(leg, frame);
+    return this.#place[0];
+  }
+
+  /** Leaves the progress in #place: a number returned may have to be put on the heap. */
+  #findProgress(leg: number, frame: number): void {
     const row = leg * at.ROW;
+    const place = this.#place;
     const t = (frame - this.table[row + at.FRAME]) * this.table[row + at.PER_FRAME];
-    // Not "t <= 0": a frame that is no number stands at the leg's start too.
-    if (!(t > 0)) return 0;
-    if (t >= 1) return 1;
-    if ((this.flags[leg] & at.CURVED_EASE) === 0) return t;
-    return bezierHeight(this.table, row + at.EASE, bezierParameter(this.table, row + at.EASE, t));
+    // Not "t < 0": a frame that is no number stands at the leg's start too.
+    place[0] = t > 0 ? (t < 1 ? t : 1) : 0;
+    if ((this.flags[leg] & at.CURVED_EASE) === 0 || !(t > 0) || t >= 1) return;
+    const table = this.#easeStarts[leg];
+    if (table >= 0) easeFromTable(place, this.#eases, table);
+    if (table >= 0 && !Number.isNaN(place[0])) return;
+    place[0] = bezierHeight(this.table, row + at.EASE, bezierParameter(this.table, row + at.EASE, t));
   }
 
   /** The last leg that begins at or before a frame; 0 where none does. */

@@ -27,19 +27,61 @@ export function bezierCoefficients([x1, y1, x2, y2]: Handles): BezierCoefficient
   return [1 + 3 * (x1 - x2), 3 * (x2 - 2 * x1), 3 * x1, 1 + 3 * (y1 - y2), 3 * (y2 - 2 * y1), 3 * y1];
 }
 
+/**
+ * Numbers that {@link writeEase} writes: the six coefficients, and three of a parabola h with
+ * `p(t) ≈ t + t (1 − t) h(t)`, which is where the search for p begins.
+ */
+export const EASE_SIZE = 9;
+
+const GUESS = 6;
+
+/** Writes what {@link bezierParameter} and the others read, from `at` on. */
+export function writeEase(table: Float64Array, at: number, handles: Handles): void {
+  table.set(bezierCoefficients(handles), at);
+  const bow = (t: number) => (bracketed(table, at, t) - t) / (t * (1 - t));
+  const [early, middle, late] = [bow(0.25), bow(0.5), bow(0.75)];
+  table[at + GUESS] = middle;
+  table[at + GUESS + 1] = (late - early) / 2;
+  table[at + GUESS + 2] = (early + late) / 2 - middle;
+}
+
+/** Halley's steps converge cubically: after one as small as this, nothing is left at slopes above STEEP_ENOUGH. */
+const SETTLED = 1e-5;
+const STEEP_ENOUGH = 0.05;
+
+/**
+ * The parameter p at which x(p) = t: two of Halley's steps from the guess, which settle all but the flattest stretches of
+ * the steepest curves.
+ *
+ * @param table, at as written by {@link writeEase}
+ * @param t in 0…1
+ */
+export function bezierParameter(table: Readonly<Float64Array>, at: number, t: number): number {
+  const ax = table[at];
+  const bx = table[at + 1];
+  const cx = table[at + 2];
+  const u = 4 * t - 2;
+  let p = t + t * (1 - t) * (table[at + GUESS] + u * (table[at + GUESS + 1] + u * table[at + GUESS + 2]));
+  let step = 0;
+  let slope = 0;
+  for (let round = 0; round < 2; round++) {
+    const miss = ((ax * p + bx) * p + cx) * p - t;
+    slope = (3 * ax * p + 2 * bx) * p + cx;
+    step = (miss * slope) / (slope * slope - miss * (3 * ax * p + bx));
+    p -= step;
+  }
+  const settled = step < SETTLED && step > -SETTLED && slope > STEEP_ENOUGH && p >= 0 && p <= 1;
+  return settled ? p : bracketed(table, at, t);
+}
+
 /** Where Newton's step is small enough: what is left after it is far smaller, as it converges quadratically. */
-const SETTLED = 1e-12;
+const SMALL = 1e-12;
 
 /** Slope of x below which Newton's step is not trusted and the interval is halved instead. */
 const FLAT = 1e-7;
 
-/**
- * The parameter p at which x(p) = t, by Newton within a shrinking bracket, so that it always ends.
- *
- * @param table holds the coefficients [ax, bx, cx, …] from `at` on
- * @param t in 0…1
- */
-export function bezierParameter(table: Readonly<Float64Array>, at: number, t: number): number {
+/** The same by Newton within a shrinking bracket, so that it always ends. */
+function bracketed(table: Readonly<Float64Array>, at: number, t: number): number {
   const ax = table[at];
   const bx = table[at + 1];
   const cx = table[at + 2];
@@ -56,7 +98,7 @@ export function bezierParameter(table: Readonly<Float64Array>, at: number, t: nu
     const stepped = inside ? next : (low + high) / 2;
     const move = Math.abs(stepped - p);
     p = stepped;
-    if (inside ? move < SETTLED : high - low < 1e-16) break;
+    if (inside ? move < SMALL : high - low < 1e-16) break;
   }
   return p;
 }

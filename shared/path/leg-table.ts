@@ -7,42 +7,42 @@
  */
 
 /** Numbers a row. */
-export const ROW = 44;
+export const ROW = 42;
 
 /** Source frame at which the leg begins. */
 export const FRAME = 0;
 /** One over the leg's length in source frames. */
 export const PER_FRAME = 1;
-/** Six coefficients of a curved ease (path/ease.ts). */
+/** Nine numbers of a curved ease (`writeEase`, path/ease.ts). */
 export const EASE = 2;
 /** Cubic of ζ = ln tan(fov/4). */
-export const ZOOM = 8;
+export const ZOOM = 11;
 /** Cubic of the eye point. */
-export const EYE = 12;
+export const EYE = 15;
 /** Horizontal field of view at the leg's first key, radians. */
-export const FOV = 16;
+export const FOV = 19;
 /** +1 or −1: the sign that keeps the quaternion continuous from the leg before. */
-export const SIGN = 17;
+export const SIGN = 20;
 
 /** Level and held legs: cubics in degrees. */
-export const YAW = 20;
-export const PITCH = 24;
-export const ROLL = 28;
+export const YAW = 21;
+export const PITCH = 25;
+export const ROLL = 29;
 
 /** Arc legs, both sorts: the first key's quaternion, turns taken out. */
-export const START = 20;
+export const START = 21;
 
 /** Eased arcs: START · (axis, 0), half the angle, the axis in camera axes, π times the whole turns of yaw and of roll. */
-export const ASIDE = 24;
-export const HALF_ANGLE = 28;
-export const AXIS = 29;
-export const YAW_HALF_TURNS = 32;
-export const ROLL_HALF_TURNS = 33;
+export const ASIDE = 25;
+export const HALF_ANGLE = 29;
+export const AXIS = 30;
+export const YAW_HALF_TURNS = 33;
+export const ROLL_HALF_TURNS = 34;
 
 /** Fair arcs: the rotation vector's cubic as c₁, c₂, c₃ of 3 numbers each; cubics of π times the whole turns. */
-export const VECTOR = 24;
-export const YAW_TURN_CUBIC = 33;
-export const ROLL_TURN_CUBIC = 37;
+export const VECTOR = 25;
+export const YAW_TURN_CUBIC = 34;
+export const ROLL_TURN_CUBIC = 38;
 
 /** Sorts of row. */
 export const LEVEL = 0;
@@ -58,14 +58,4 @@ export const ROLLS = 8;
 /** @returns the value of the cubic at `at` */
 export function cubic(table: Readonly<Float64Array>, at: number, s: number): number {
   return ((table[at + 3] * s + table[at + 2]) * s + table[at + 1]) * s + table[at];
-}
-
-/** @returns the first derivative of the cubic at `at`, by s */
-export function cubicSlope(table: Readonly<Float64Array>, at: number, s: number): number {
-  return (3 * table[at + 3] * s + 2 * table[at + 2]) * s + table[at + 1];
-}
-
-/** @returns the second derivative of the cubic at `at`, by s */
-export function cubicBend(table: Readonly<Float64Array>, at: number, s: number): number {
-  return 6 * table[at + 3] * s + 2 * table[at + 2];
 }

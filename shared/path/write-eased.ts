@@ -5,7 +5,7 @@ import { conjugate, dot, multiply } from '#shared/rotation/quaternion';
 import { rotationVectorFromQuat } from '#shared/rotation/rotation-vector';
 import { HALF_TURN_SLACK } from '#shared/rotation/slerp';
 import { quatFromYawPitchRoll } from '#shared/rotation/yaw-pitch-roll';
-import { bezierCoefficients, bezierHandles } from './ease';
+import { bezierHandles, writeEase } from './ease';
 import * as at from './leg-table';
 import { wholeTurns } from './whole-turns';
 
@@ -43,7 +43,7 @@ export function writeEased(place: Row, leg: Leg, from: Key, to: Key): [sort: num
   writeStraight(table, row + at.ZOOM, zoomFromFov(from.fov * RAD_PER_DEG), zoomFromFov(to.fov * RAD_PER_DEG));
   writeStraight(table, row + at.EYE, from.eye, to.eye);
   const handles = bezierHandles(leg.ease);
-  if (handles) table.set(bezierCoefficients(handles), row + at.EASE);
+  if (handles) writeEase(table, row + at.EASE, handles);
   const flags = (handles ? at.CURVED_EASE : 0) | (from.fov === to.fov ? 0 : at.ZOOMS);
   return leg.path === 'level'
     ? [at.LEVEL, flags | writeLevel(place, from, to)]

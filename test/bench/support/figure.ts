@@ -24,3 +24,22 @@ export function printFigure(figure: Omit<Figure, 'holds' | 'ratio'>): void {
   if (!holds) process.exitCode = 1;
   process.stdout.write(`${JSON.stringify({ name, value, unit, floor, ratio, limit, holds })}\n`);
 }
+
+/**
+ * Runs several things in turn, round after round, so that what else the machine does falls on all of them.
+ *
+ * @returns each one's median, milliseconds; the first rounds, in which code is still being compiled, do not count
+ */
+export function inTurn(rounds: number, things: readonly (() => void)[]): readonly number[] {
+  const times = things.map((): number[] => []);
+  for (let round = -WARM_UP; round < rounds; round++) {
+    things.forEach((thing, i) => {
+      const began = performance.now();
+      thing();
+      if (round >= 0) times[i].push(performance.now() - began);
+    });
+  }
+  return times.map(median);
+}
+
+const WARM_UP = 5;
