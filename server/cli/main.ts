@@ -7,9 +7,10 @@ type Verb = (args: readonly string[]) => number | Promise<number>;
 /** Each verb in a file of its own, loaded when it is asked for: `check` should not wait for what `export` needs. */
 const VERBS: Readonly<Record<string, () => Promise<Verb>>> = {
   check: async () => (await import('./verbs/check')).check,
+  bake: async () => (await import('./verbs/bake')).bake,
   frame: async () => (await import('./verbs/frame')).frame,
   render: async () => (await import('./verbs/render')).render,
-  bake: async () => (await import('./verbs/bake')).bake,
+  measure: async () => (await import('./verbs/measure')).measure,
 };
 
 async function run([name, ...args]: readonly string[]): Promise<number> {

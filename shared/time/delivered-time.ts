@@ -19,9 +19,14 @@ export function deliveredFrameCount({ speed, from, to }: ShotTimes): number {
   return Math.floor((to - from) / speed + FRAME_SLACK) + 1;
 }
 
-/** @returns the source frame that delivered frame `index` (from 0) shows; not whole where the speed is not */
+/**
+ * @returns the source frame that delivered frame `index` (from 0) shows; not whole where the speed is not, but whole
+ *   where only the speed's decimals keep it from being so: a hold must be left at its key, not a frame late
+ */
 export function sourceFrameOfDelivered({ speed, from, to }: ShotTimes, index: number): number {
-  return Math.min(from + index * speed, to);
+  const frame = Math.min(from + index * speed, to);
+  const whole = Math.round(frame);
+  return Math.abs(frame - whole) < FRAME_SLACK ? whole : frame;
 }
 
 /** @returns the delivered frame, from 0 and not rounded, that shows a source frame */

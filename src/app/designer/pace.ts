@@ -1,16 +1,11 @@
 import { DEG_PER_RAD } from '#shared/conventions';
 import { type CompleteShotTimes } from '#shared/document/shot-times';
+import { CROSSING_LIMIT_SEC } from '#shared/measure/limits';
 import { type CompiledMove, POSE_SIZE } from '#shared/path/compiled-move';
 import { latOfDirection, lonOfDirection } from '#shared/projection/equirectangular';
 import { radiusAtAngle } from '#shared/projection/general-perspective';
 import { rotate } from '#shared/rotation/quaternion';
 import { sourceFramesPerDeliveredSecond } from '#shared/time/delivered-time';
-
-/**
- * Shortest time that a still thing may need to cross the frame's width at 24 to 30 frames a second and a 180° shutter,
- * seconds; faster pans strobe. Common practice, no source.
- */
-export const CROSSING_LIMIT_SEC = 7;
 
 /** A point of the course: where the frame's centre is, and how fast it passes. */
 export interface CoursePoint {

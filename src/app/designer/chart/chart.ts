@@ -15,12 +15,13 @@ import { MatIconModule } from '@angular/material/icon';
 import { MatTooltipModule } from '@angular/material/tooltip';
 
 import { DEG_PER_RAD } from '#shared/conventions';
+import { CROSSING_LIMIT_SEC } from '#shared/measure/limits';
 import { POSE_SIZE } from '#shared/path/compiled-move';
 import { directionFromLonLat, lonOfDirection } from '#shared/projection/equirectangular';
 import { type Frame } from '#shared/projection/footprint';
 import { rotate } from '#shared/rotation/quaternion';
 import { nearest } from '../framed-view/grab';
-import { coursePoints, CROSSING_LIMIT_SEC } from '../pace';
+import { coursePoints } from '../pace';
 import { paceColour, PACE_STEPS } from '../pace-ramp';
 import { PlatePictures } from '../plate-pictures';
 import { DesignerSession } from '../session/designer-session';

@@ -10,8 +10,9 @@ import { MatButtonModule } from '@angular/material/button';
 import { MatTooltipModule } from '@angular/material/tooltip';
 
 import { type Key, type Leg } from '#schemas/move';
+import { CROSSING_LIMIT_SEC } from '#shared/measure/limits';
 import { deliveredFrameCount, deliveredSeconds } from '#shared/time/delivered-time';
-import { coursePoints, CROSSING_LIMIT_SEC } from '../pace';
+import { coursePoints } from '../pace';
 import { DesignerSession } from '../session/designer-session';
 import { retimeKey } from '../state/commands';
 import { Player } from '../transport/player';

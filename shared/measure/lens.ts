@@ -1,0 +1,160 @@
+import { sineCosines } from '#shared/rotation/sine-cosines';
+
+/** Places in {@link Lens.numbers}: half sides on the tangent plane, and the eye point. */
+export const HALF_WIDTH = 0;
+export const HALF_HEIGHT = 1;
+export const EYE = 2;
+
+/** The frame on the tangent plane, of a deliverable, at one field of view and eye point. */
+export class Lens {
+  /** In an array, as numbers kept or handed on one by one may have to be put on the heap. */
+  readonly numbers = new Float64Array(3);
+  readonly #angle = new Float64Array(1);
+  readonly #turn = new Float64Array(2);
+
+  /**
+   * @param ratio how much wider the deliverable's frame is than the first's (projection/deliverable-framing.ts)
+   * @param heightPerWidth of the deliverable
+   */
+  constructor(
+    readonly ratio: number,
+    readonly heightPerWidth: number,
+  ) {}
+
+  /**
+   * @param pose holds the first deliverable's horizontal field of view and the eye point, as `poseAt` leaves them
+   * @returns whether anything changed
+   */
+  set(pose: Readonly<Float64Array>): boolean {
+    const numbers = this.numbers;
+    const eye = pose[5];
+    if (pose[4] === 2 * this.#angle[0] && eye === numbers[EYE]) return false;
+    this.#angle[0] = pose[4] / 2;
+    sineCosines(this.#turn, this.#angle, 1);
+    const halfWidth = (this.ratio * (1 + eye) * this.#turn[0]) / (eye + this.#turn[1]);
+    numbers[HALF_WIDTH] = halfWidth;
+    numbers[HALF_HEIGHT] = halfWidth * this.heightPerWidth;
+    numbers[EYE] = eye;
+    return true;
+  }
+}
+
+/** Places in {@link Rectangle.edges}: cosines of the angles from the axis to the nearest side and to a corner. */
+export const INNER = 0;
+export const OUTER = 1;
+
+/**
+ * A rectangle on the tangent plane about the frame's centre, as a set of directions: what of a circle on the sphere
+ * shows in it. Lines on the plane are circles on the sphere, so nothing here is sampled.
+ */
+export class Rectangle {
+  /** See the places above. */
+  readonly edges = new Float64Array(2);
+  readonly #numbers = new Float64Array(3);
+  readonly #corner = new Float64Array(3);
+
+  /** @param share of the frame's width that it has; all of its height */
+  set(lens: Lens, share: number): void {
+    const numbers = this.#numbers;
+    const corner = this.#corner;
+    const edges = this.edges;
+    const eye = lens.numbers[EYE];
+    const x = lens.numbers[HALF_WIDTH] * share;
+    const y = lens.numbers[HALF_HEIGHT];
+    numbers[HALF_WIDTH] = x;
+    numbers[HALF_HEIGHT] = y;
+    numbers[EYE] = eye;
+    const nearest = x < y ? x : y;
+    const side = rayLength(nearest * nearest, eye);
+    edges[INNER] = side * (1 + eye) - eye;
+    const t = rayLength(x * x + y * y, eye);
+    corner[0] = t * x;
+    corner[1] = t * y;
+    corner[2] = eye - t * (1 + eye);
+    edges[OUTER] = -corner[2];
+  }
+
+  /** Whether a camera direction shows. */
+  holds(x: number, y: number, z: number): boolean {
+    const eye = this.#numbers[EYE];
+    const depth = eye - z;
+    if (depth <= 0) return false;
+    const scale = (1 + eye) / depth;
+    return (
+      Math.abs(x) * scale <= this.#numbers[HALF_WIDTH] && Math.abs(y) * scale <= this.#numbers[HALF_HEIGHT]
+    );
+  }
+
+  /**
+   * Whether a corner lies on the far side of the circle `axis · direction = height`.
+   *
+   * @returns how many of the four have `axis · corner ≥ height`
+   */
+  cornersBeyond(x: number, y: number, z: number, height: number): number {
+    const cx = this.#corner[0] * x;
+    const cy = this.#corner[1] * y;
+    const rest = this.#corner[2] * z - height;
+    return (
+      Number(cx + cy + rest >= 0) +
+      Number(cx - cy + rest >= 0) +
+      Number(cy - cx + rest >= 0) +
+      Number(rest - cx - cy >= 0)
+    );
+  }
+
+  /**
+   * Whether the circle `axis · direction = height` crosses a side.
+   *
+   * A side stands on the plane `(1 + d) v = s (d − w)`, v the direction's part along the side's normal, w its depth and s
+   * where the side stands; so the crossings are where two planes and the sphere meet.
+   */
+  isCrossedBy(x: number, y: number, z: number, height: number): boolean {
+    const right = this.#numbers[HALF_WIDTH];
+    const top = this.#numbers[HALF_HEIGHT];
+    return (
+      this.#sideCrossed(x, y, z, height, right, top) ||
+      this.#sideCrossed(-x, y, z, height, right, top) ||
+      this.#sideCrossed(y, x, z, height, top, right) ||
+      this.#sideCrossed(-y, x, z, height, top, right)
+    );
+  }
+
+  /**
+   * The side at +s across the first axis, reaching ±reach along the second.
+   *
+   * With the side's plane `a v + s w = s d` (a = 1 + d) and the circle's `x v + y u + z w = h`, directions (v, u, w) on
+   * both are P + λ L, L the cross product of the planes' normals and P the foot of the perpendicular from the centre.
+   */
+  #sideCrossed(x: number, y: number, z: number, h: number, s: number, reach: number): boolean {
+    const d = this.#numbers[EYE];
+    const a = 1 + d;
+    const lv = -s * y;
+    const lu = s * x - a * z;
+    const lw = a * y;
+    const squared = lv * lv + lu * lu + lw * lw;
+    if (squared === 0) return false;
+    // P = (k₁ (n₂ × L) + k₂ (L × n₁)) / |L|², n₁ = (a, 0, s), k₁ = s d, n₂ = (x, y, z), k₂ = h.
+    const k = (s * d) / squared;
+    const m = h / squared;
+    const pv = k * (y * lw - z * lu) + m * (lu * s);
+    const pu = k * (z * lv - x * lw) + m * (lw * a - lv * s);
+    const pw = k * (x * lu - y * lv) - m * (lu * a);
+    const room = 1 - pv * pv - pu * pu - pw * pw;
+    if (room < 0) return false;
+    const step = Math.sqrt(room / squared);
+    return (
+      onSide(pu + step * lu, pw + step * lw, d, reach) || onSide(pu - step * lu, pw - step * lw, d, reach)
+    );
+  }
+}
+
+function onSide(along: number, depth: number, eye: number, reach: number): boolean {
+  const room = eye - depth;
+  return room > 0 && Math.abs(along) * (1 + eye) <= reach * room;
+}
+
+/** What a point of the tangent plane, that far squared from its centre, is multiplied by to fall on the sphere. */
+function rayLength(squared: number, eye: number): number {
+  const a = 1 + eye;
+  return (eye * a + Math.sqrt(a * a + squared * (1 - eye * eye))) / (squared + a * a);
+}
