@@ -8,6 +8,8 @@ type Verb = (args: readonly string[]) => number | Promise<number>;
 const VERBS: Readonly<Record<string, () => Promise<Verb>>> = {
   check: async () => (await import('./verbs/check')).check,
   bake: async () => (await import('./verbs/bake')).bake,
+  export: async () => (await import('./verbs/export')).exportMove,
+  apply: async () => (await import('./verbs/apply')).apply,
   frame: async () => (await import('./verbs/frame')).frame,
   render: async () => (await import('./verbs/render')).render,
   measure: async () => (await import('./verbs/measure')).measure,

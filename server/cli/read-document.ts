@@ -1,6 +1,10 @@
 import { readFileSync } from 'node:fs';
 
 import { type MoveDocument } from '#schemas/move';
+import { type SavedMove } from '#schemas/saved-move';
+import { type CheckedAs } from '#shared/document/check-document';
+import { type Fault } from '#shared/document/fault';
+import { checkSavedMove } from '#shared/document/saved-move';
 import { checkMove } from '#shared/document/validate';
 import { UsageError } from './usage';
 
@@ -30,12 +34,21 @@ function nameOf(file: string): string {
 
 /** @throws UsageError where the file is no valid move document: its first fault, and how many there are */
 export function readMove(file: string): MoveDocument {
-  const checked = checkMove(readJson(file));
+  return documentIn(file, checkMove(readJson(file)), 'a valid move document', `; see: check ${file}`);
+}
+
+/** @throws UsageError where the file is no valid saved move: its first fault, and how many there are */
+export function readSavedMove(file: string): SavedMove {
+  return documentIn(file, checkSavedMove(readJson(file)), 'a valid saved move');
+}
+
+function documentIn<T>(file: string, checked: CheckedAs<T>, wantedKind: string, advice = ''): T {
   if (checked.ok) return checked.document;
-  const [first] = checked.faults;
-  const more =
-    checked.faults.length > 1 ? ` (and ${checked.faults.length - 1} more; see: check ${file})` : '';
-  throw new UsageError(
-    `${nameOf(file)} is not a valid move document: ${first.pointer}: ${first.detail}${more}`,
-  );
+  throw new UsageError(`${nameOf(file)} is not ${wantedKind}: ${faultsInOneLine(checked.faults, advice)}`);
+}
+
+/** The first of a document's faults, and how many more there are. */
+export function faultsInOneLine([first, ...others]: readonly Fault[], advice = ''): string {
+  const more = others.length > 0 ? ` (and ${others.length} more${advice})` : '';
+  return `${first.pointer === '' ? '' : `${first.pointer}: `}${first.detail}${more}`;
 }
