@@ -18,12 +18,14 @@ const MOST_TICKS = 2 ** 31 - 1;
  *
  * Delivered frame j shows footage frame floor(from + j · speed): a picture cannot be shown in part. Footage frames are
  * counted, whatever times they carry; the time base is chosen so that every one of them is a whole number of ticks, since
- * a rounded one would now and then come a frame late. Each frame's commands hold from half a frame early to half a frame
- * late. Sides that are odd are made even.
+ * a rounded one would now and then come a frame late. A speed of many decimals (7.123456 at 60000/1001) is taken as the
+ * nearest fraction that fits FFmpeg's time base, and a frame in a hundred may then be its neighbour. Each frame's commands hold from half a frame early to half a frame
+ * late. Sides that are odd are made even. Sound is left out: at another speed it would no longer fit. Footage that ends
+ * before the film does makes no film, rather than a short one.
  *
  * @param framesAFile how many frames' commands go into one file
  * @returns texts by file name: `render.sh` and `move.cmd`, or `move-1.cmd`, `move-2.cmd`, … of long films
- * @throws NotForFfmpeg, UnknownDeliverable
+ * @throws EyePointBetween, NotForFfmpeg, UnknownDeliverable
  */
 export function ffmpegScript(
   document: MoveDocument,
@@ -118,10 +120,11 @@ part="$(dirname "$out")/.part-$$-$(basename "$out")"
 trap 'rm -f "$part"' EXIT
 read -r -a encoder <<< "\${ENCODER:--c:v libx264 -preset medium -crf 16 -pix_fmt yuv420p}"
 
-cd "$(dirname "\${BASH_SOURCE[0]}")"
-ffmpeg -hide_banner -loglevel warning -stats -nostdin -i "file:$footage" -map 0:v:0 -an \\
+CDPATH='' cd -- "$(dirname -- "\${BASH_SOURCE[0]}")"
+made=$(ffmpeg -hide_banner -loglevel warning -stats -nostdin -i "file:$footage" -map 0:v:0 -an \\
   -vf '${graph}' \\
-  -frames:v ${frames} "\${encoder[@]}" "file:$part"
+  -frames:v ${frames} -progress pipe:1 "\${encoder[@]}" "file:$part" | sed -n 's/^frame=//p' | tail -n 1)
+[ "$made" = ${frames} ] || fail "the footage ends too soon: it gives \${made:-0} of ${frames} frames. Nothing was kept"
 mv "$part" "$out"
 `;
 }

@@ -1,4 +1,4 @@
-import { type MoveDocument } from '#schemas/move';
+import { type Key, type MoveDocument } from '#schemas/move';
 import { DEG_PER_RAD } from '#shared/conventions';
 import { shotTimes } from '#shared/document/shot-times';
 import { compileMove } from '#shared/path/compile';
@@ -11,6 +11,16 @@ import { deliverableNamed } from './frames-table';
 
 /** Thrown where FFmpeg's v360 cannot draw a move; the message says what to change. */
 export class NotForFfmpeg extends Error {}
+
+/** Thrown where delivered frames have eye points between 0 and 1, or some 0 and some 1; the message names the keys. */
+export class EyePointBetween extends NotForFfmpeg {
+  constructor(eye: 0 | 1, keys: readonly Key[]) {
+    const named = keys.map(key => `${key.frame} (${key.eye})`).join(', ');
+    super(
+      `FFmpeg draws eye points 0 and 1 alone, one of them throughout. Keys to make ${eye}, by frame: ${named}.`,
+    );
+  }
+}
 
 /** What v360 is told for one delivered frame, degrees as text. */
 export interface V360View {
@@ -44,19 +54,17 @@ const DECIMALS = 6;
 /**
  * The delivered film as v360 sees it. v360's yaw, pitch and roll are ours; a level rotation is folded into them.
  *
- * @throws NotForFfmpeg where an eye point lies between 0 and 1 or a field of view is too wide; UnknownDeliverable
+ * @throws EyePointBetween; NotForFfmpeg where a field of view is too wide; UnknownDeliverable
  */
 export function v360Film(document: MoveDocument, deliverableName?: string): V360Film {
   const { shot, deliverables } = document;
   const deliverable = deliverableNamed(document, deliverableName);
   const ratio = halfWidthRatio(deliverables[0], deliverable);
   const [width, height] = [even(deliverable.width), even(deliverable.height)];
-  const times = shotTimes(shot);
-  const move = compileMove(document);
-  const [pose, angles] = [new Float64Array(POSE_SIZE), new Float64Array(3)];
-  const eye = theEyePoint(document);
-  const views = Array.from({ length: deliveredFrameCount(times) }, (_, frame): V360View => {
-    move.poseAt(pose, sourceFrameOfDelivered(times, frame));
+  const poses = deliveredPoses(document);
+  const eye = theEyePoint(document, poses);
+  const angles = new Float64Array(3);
+  const views = poses.map((pose, frame): V360View => {
     const fovRad = matchedFovRad(pose[4], eye, ratio);
     sourceOrientation(pose, shot.level ?? [0, 0, 0, 1], pose);
     yawPitchRollFromQuat(angles, pose, angles[2]);
@@ -66,16 +74,37 @@ export function v360Film(document: MoveDocument, deliverableName?: string): V360
   return { width, height, projection: eye === 0 ? 'flat' : 'sg', views };
 }
 
-/** The eye point of the whole film, 0 or 1. */
-function theEyePoint({ keys }: MoveDocument): 0 | 1 {
-  const eye = keys[0].eye < 0.5 ? 0 : 1;
-  const others = keys.filter(key => Math.abs(key.eye - eye) > EYE_SLACK);
-  if (others.length === 0) return eye;
-  const all = keys.filter(key => Math.abs(key.eye) > EYE_SLACK && Math.abs(key.eye - 1) > EYE_SLACK);
-  const named = (all.length > 0 ? all : others).map(key => `${key.frame} (${key.eye})`).join(', ');
-  throw new NotForFfmpeg(
-    `FFmpeg draws eye points 0 and 1 alone, one of them throughout; make all keys 0 or all 1. Keys to change, by frame: ${named}.`,
+function deliveredPoses(document: MoveDocument): Float64Array[] {
+  const times = shotTimes(document.shot);
+  const move = compileMove(document);
+  return Array.from({ length: deliveredFrameCount(times) }, (_, frame) => {
+    const pose = new Float64Array(POSE_SIZE);
+    move.poseAt(pose, sourceFrameOfDelivered(times, frame));
+    return pose;
+  });
+}
+
+/** The eye point of the whole film. Frames are asked, not keys: a key outside the delivered range may be anything. */
+function theEyePoint(document: MoveDocument, poses: readonly Readonly<Float64Array>[]): 0 | 1 {
+  const eye = poses[0][5] < 0.5 ? 0 : 1;
+  if (poses.every(pose => Math.abs(pose[5] - eye) <= EYE_SLACK)) return eye;
+  const reaching = keysOfDelivered(document);
+  const target = others(reaching, 1).length < others(reaching, 0).length ? 1 : 0;
+  const wrong = others(reaching, target);
+  // Fair legs feel keys beyond their own ends.
+  throw new EyePointBetween(target, wrong.length > 0 ? wrong : others(document.keys, target));
+}
+
+/** The keys whose legs the delivered range touches. */
+function keysOfDelivered({ shot, keys }: MoveDocument): Key[] {
+  const { from, to } = shotTimes(shot);
+  return keys.filter(
+    (_, i) => (i === keys.length - 1 || keys[i + 1].frame > from) && (i === 0 || keys[i - 1].frame < to),
   );
+}
+
+function others(keys: readonly Key[], eye: number): Key[] {
+  return keys.filter(key => Math.abs(key.eye - eye) > EYE_SLACK);
 }
 
 function fieldsOfView(fovRad: number, eye: number, width: number, height: number, frame: number) {
@@ -83,13 +112,14 @@ function fieldsOfView(fovRad: number, eye: number, width: number, height: number
   const part = eye === 0 ? 2 : 4;
   const tangent = Math.tan(fovRad / part);
   const wide = (sides: number) => part * Math.atan((tangent * sides) / width) * DEG_PER_RAD;
-  const down = wide(height);
-  if (down > WIDEST_DEG)
+  const [across, down] = [wide(width), wide(height)];
+  const widest = Math.max(across, down);
+  if (widest > WIDEST_DEG)
     throw new NotForFfmpeg(
-      `FFmpeg draws fields of view of at most ${WIDEST_DEG}°; delivered frame ${frame} is ${down.toFixed(1)}° high. Make the keys about it narrower.`,
+      `FFmpeg draws fields of view of at most ${WIDEST_DEG}°; delivered frame ${frame} is ${widest.toFixed(1)}° ${widest === down ? 'high' : 'wide'}. Make the keys about it narrower.`,
     );
   return {
-    h_fov: (fovRad * DEG_PER_RAD).toFixed(DECIMALS),
+    h_fov: across.toFixed(DECIMALS),
     v_fov: down.toFixed(DECIMALS),
     d_fov: wide(Math.hypot(width, height)).toFixed(DECIMALS),
   };

@@ -11,9 +11,10 @@ import {
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 
-import { type Key, type Leg, type MoveDocument, type Shot } from '#schemas/move';
+import { type Deliverable, type Key, type Leg, type MoveDocument, type Shot } from '#schemas/move';
 import { ffmpegScript } from '#shared/export/ffmpeg-script';
 import { fraction } from '#shared/export/fraction';
+import { EyePointBetween } from '#shared/export/v360-commands';
 import { compileMove } from '#shared/path/compile';
 import { POSE_SIZE } from '#shared/path/compiled-move';
 import { halfWidthRatio } from '#shared/projection/deliverable-framing';
@@ -150,7 +151,7 @@ function angleTo(truth: readonly number[], film: Buffer, at: number): number {
 function shotted(
   keys: Key[],
   over: Partial<Shot>,
-  deliverables = [{ name: 'W', width: 96, height: 54 }],
+  deliverables: Deliverable[] = [{ name: 'W', width: 96, height: 54 }],
 ): MoveDocument {
   const move = moveWith(keys, { deliverables });
   return { ...move, shot: { ...move.shot, frames: FOOTAGE_FRAMES, source: SOURCE, ...over } };
@@ -212,6 +213,21 @@ describe('the film that FFmpeg renders by the script shows what we say', () => {
     expect(meanErrorDeg(rendered(move, 'slow'), move, expected)).toBeLessThan(MOST_MEAN_ERROR_DEG);
   }, 60_000);
 
+  it('at two thirds of the speed, to the last frame of the footage, past a yaw of 180', () => {
+    const keys = joined([key(0, { yaw: 150 }), key(30, { yaw: 180 }), key(60, { yaw: 210 })], {
+      path: 'arc',
+      ease: 'linear',
+    });
+    const move = shotted(keys, { from: 20, speed: 2 / 3 });
+    const source = (j: number) => 20 + (2 * j) / 3;
+    const expected = {
+      frames: 61,
+      footageFrame: (j: number) => 20 + Math.floor((2 * j) / 3),
+      sourceFrame: source,
+    };
+    expect(meanErrorDeg(rendered(move, 'end'), move, expected)).toBeLessThan(MOST_MEAN_ERROR_DEG);
+  }, 60_000);
+
   it('with its commands in several files', () => {
     const move = shotted(joined([key(0), key(60, { yaw: 700, fov: 50 })], FAIR), { to: 30 });
     expect(Object.keys(ffmpegScript(move, undefined, 7))).toEqual([
@@ -227,6 +243,38 @@ describe('the film that FFmpeg renders by the script shows what we say', () => {
 
 describe('the script', () => {
   const move = shotted(joined([key(0), key(60, { yaw: 90 })], FAIR), {});
+
+  it('is Bash, without faults of syntax', () => {
+    const { status, stderr } = spawnSync('bash', ['-n'], {
+      input: ffmpegScript(move)['render.sh'],
+      encoding: 'utf8',
+    });
+    expect([status, stderr]).toEqual([0, '']);
+  });
+
+  it('finds its commands wherever a shell would rather go', () => {
+    mkdirSync(path.join(folder, 'elsewhere', 'near'), { recursive: true });
+    const place = path.join(folder, 'near');
+    mkdirSync(place);
+    for (const [file, text] of Object.entries(ffmpegScript(move)))
+      writeFileSync(path.join(place, file), text);
+    const { status } = spawnSync('bash', ['near/render.sh', 'foot age.mkv', 'near.raw'], {
+      cwd: folder,
+      env: { ...process.env, ...RAW, CDPATH: path.join(folder, 'elsewhere') },
+    });
+    expect(status).toBe(0);
+  }, 60_000);
+
+  it('gives a file of commands to each 5,000 frames', () => {
+    const long = shotted(joined([key(0), key(10_000, { yaw: 90 })], FAIR), { frames: 10_001 });
+    const files = ffmpegScript(long);
+    expect(Object.keys(files)).toEqual(['render.sh', 'move-1.cmd', 'move-2.cmd', 'move-3.cmd']);
+    expect(files['render.sh']).toContain(
+      'sendcmd=f=move-1.cmd,sendcmd=f=move-2.cmd,sendcmd=f=move-3.cmd,v360=',
+    );
+    // Frame 5,000 at 24 a second, from half a frame early to half a frame late.
+    expect(files['move-2.cmd']).toMatch(/^#.*\n208\.312500-208\.354167 v360 yaw /);
+  });
 
   it('makes a film that players know, unless it is told otherwise', () => {
     const out = path.join(folder, 'film.mp4');
@@ -271,6 +319,14 @@ describe('the script', () => {
     expect(readdirSync(folder).filter(name => name.includes('half.mp4'))).toEqual([]);
   });
 
+  it('makes no film of footage that ends too soon', () => {
+    const longer = shotted(joined([key(0), key(80, { yaw: 90 })], FAIR), { frames: 81 });
+    const { status, stderr } = run(ffmpegScript(longer), 'short', [footage, 'short.raw']);
+    expect(status).toBe(2);
+    expect(stderr).toContain(`it gives ${FOOTAGE_FRAMES} of 81 frames`);
+    expect(readdirSync(folder).filter(name => name.includes('short.raw'))).toEqual([]);
+  }, 60_000);
+
   it('holds whatever a title may say as a comment', () => {
     const hostile = { ...move, title: 'A\'\n"`touch owned`$(touch owned)\r\n; touch owned\u2028touch owned' };
     const files = ffmpegScript(hostile);
@@ -288,11 +344,41 @@ describe('the script', () => {
   });
 });
 
-it('eye points between 0 and 1 are refused, with the keys to change', () => {
-  const move = shotted(joined([key(0), key(20, { eye: 0.2 }), key(60)], FAIR), {});
-  expect(() => ffmpegScript(move)).toThrow(/20 \(0\.2\)/);
-  const mixed = shotted(joined([key(0), key(60, { eye: 1 })], FAIR), {});
-  expect(() => ffmpegScript(mixed)).toThrow(/60 \(1\)/);
+describe('what v360 cannot draw is refused', () => {
+  const refused = (keys: Key[], over: Partial<Shot> = {}) => {
+    const move = shotted(joined(keys, { path: 'level', ease: 'linear' }), over);
+    return () => ffmpegScript(move);
+  };
+
+  it('eye points between 0 and 1, with the keys to change', () => {
+    const between = refused([key(0), key(20, { eye: 0.2 }), key(60)]);
+    expect(between).toThrow(EyePointBetween);
+    expect(between).toThrow('Keys to make 0, by frame: 20 (0.2).');
+    expect(refused([key(0), key(60, { eye: 1 })])).toThrow('Keys to make 0, by frame: 60 (1).');
+  });
+
+  it('with the fewest keys to change', () => {
+    const keys = [key(0, { eye: 0.9 }), key(20, { eye: 1 }), key(60, { eye: 1 })];
+    expect(refused(keys)).toThrow('Keys to make 1, by frame: 0 (0.9).');
+  });
+
+  it('in delivered frames alone', () => {
+    const keys = [key(0), key(20), key(40, { eye: 0.5 }), key(60, { eye: 0.7 })];
+    expect(refused(keys, { to: 20 })).not.toThrow();
+    expect(refused(keys, { to: 21 })).toThrow('Keys to make 0, by frame: 40 (0.5).');
+  });
+
+  // Truth: tan of a quarter of the angle grows with the side, and tan(359°/4) is 30.17 times tan(330°/4).
+  it('fields of view beyond 359°', () => {
+    const keys = [key(0, { eye: 1, fov: 330 })];
+    const square = { name: 'Square', width: 10, height: 10 };
+    const strip = (width: number, height: number, match: 'width' | 'height') => () =>
+      ffmpegScript(shotted(keys, {}, [square, { name: 'Strip', width, height, match }]), 'Strip');
+    expect(strip(10, 310, 'width')).toThrow(/delivered frame 0 is 359\.\d° high/);
+    expect(strip(310, 10, 'height')).toThrow(/delivered frame 0 is 359\.\d° wide/);
+    expect(strip(10, 300, 'width')).not.toThrow();
+    expect(strip(300, 10, 'height')).not.toThrow();
+  });
 });
 
 // Truth: arithmetic.
