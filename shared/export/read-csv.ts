@@ -68,7 +68,7 @@ function plainField(text: string, from: number): Quoted {
 /** A quote within the field is written twice. */
 function quotedField(text: string, from: number): Quoted {
   const parts: string[] = [];
-  for (let at = from + 1; ; ) {
+  for (let at = from + 1; ;) {
     const quote = text.indexOf('"', at);
     if (quote < 0) return { text: '', next: text.length, wrong: 'a quoted field does not end' };
     const twice = text[quote + 1] === '"';
