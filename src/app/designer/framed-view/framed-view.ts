@@ -11,15 +11,30 @@ import {
   viewChild,
 } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
+import { MatDividerModule } from '@angular/material/divider';
 import { MatIconModule } from '@angular/material/icon';
+import { MatMenuModule } from '@angular/material/menu';
 import { MatTooltipModule } from '@angular/material/tooltip';
 
+import { sourceOrientation } from '#shared/render/camera';
 import { PlatePictures } from '../plate-pictures';
 import { DesignerSession } from '../session/designer-session';
 import { changeKey, type Look, setKey } from '../state/commands';
 import { Player } from '../transport/player';
+import { type Way } from './drawer';
+import { DrawingWay } from './drawing-way';
+import { FramedDrawing } from './framed-drawing';
 import { lookHolding, type PicturePoint, worldDirection, zoomed } from './grab';
-import { type FramedRenderer } from './renderer';
+import {
+  centredBox,
+  deliverableBox,
+  levelLinePath,
+  OVERLAYS,
+  SAFE_ACTION,
+  SAFE_TITLE,
+  seamPath,
+} from './overlays';
+import { ShownOverlays } from './shown-overlays';
 
 /** What a wheel notch does to the tangent of a quarter of the field of view. */
 const ZOOM_PER_PIXEL = 1.0015;
@@ -27,8 +42,11 @@ const ZOOM_PER_PIXEL = 1.0015;
 /** How long after the last turn of the wheel a zoom of a key counts as done. */
 const WHEEL_ENDS_MS = 250;
 
-/** Without a framed view the chart alone needs a picture. */
-const CHART_ONLY = 4096;
+/** Who draws, as the menu names them. */
+const WAYS: readonly { readonly way: Way; readonly label: string }[] = [
+  { way: 'graphics', label: 'Drawn by the graphics card' },
+  { way: 'processor', label: 'Drawn by the processor' },
+];
 
 interface Grip {
   readonly pointer: number;
@@ -47,19 +65,24 @@ interface Pinch {
  */
 @Component({
   selector: 'fl-framed-view',
-  imports: [MatButtonModule, MatIconModule, MatTooltipModule],
+  imports: [MatButtonModule, MatDividerModule, MatIconModule, MatMenuModule, MatTooltipModule],
   templateUrl: './framed-view.html',
   styleUrl: './framed-view.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
+  providers: [FramedDrawing],
 })
 export class FramedView {
   protected readonly session = inject(DesignerSession);
   protected readonly pictures = inject(PlatePictures);
   readonly #player = inject(Player);
   readonly #destroy = inject(DestroyRef);
-  protected readonly canvasElement = viewChild.required<ElementRef<HTMLCanvasElement>>('canvas');
+  protected readonly pictureElement = viewChild.required<ElementRef<HTMLElement>>('picture');
+  protected readonly graphicsCanvas = viewChild.required<ElementRef<HTMLCanvasElement>>('graphicsCanvas');
+  protected readonly processorCanvas = viewChild.required<ElementRef<HTMLCanvasElement>>('processorCanvas');
   protected readonly boxElement = viewChild.required<ElementRef<HTMLElement>>('box');
-  readonly #renderer = signal<FramedRenderer | undefined>(undefined);
+  protected readonly drawing = inject(DrawingWay);
+  readonly #drawn = inject(FramedDrawing);
+  readonly #held = signal(false);
   readonly #place = signal({ left: 0, top: 0, width: 0, height: 0 });
   readonly #pointers = new Map<number, PicturePoint>();
   #grip: Grip | undefined;
@@ -67,9 +90,10 @@ export class FramedView {
   #frameRequest = 0;
   #wheelTimer: ReturnType<typeof setTimeout> | undefined;
 
-  protected readonly failure = signal('');
-  protected readonly thirds = signal(readFlag('thirds'));
-  protected readonly levelLine = signal(readFlag('level-line'));
+  protected readonly failure = this.#drawn.failure;
+  protected readonly overlays = inject(ShownOverlays);
+  protected readonly overlayChoices = OVERLAYS;
+  protected readonly wayChoices = WAYS;
   protected readonly heightPerWidth = computed(() => {
     const [first] = this.session.move().deliverables;
     return first.height / first.width;
@@ -84,33 +108,34 @@ export class FramedView {
     const top = onPixel(place.top + (place.height - height) / 2) - place.top;
     return { width, height, left, top };
   });
-  /** The widest picture worth loading, pixels; unknown until the graphics card has been asked. */
-  readonly widestPicture = computed(
-    () => this.#renderer()?.largestTexture ?? (this.failure() ? CHART_ONLY : undefined),
-  );
+  protected readonly viewBox = computed(() => `-1 ${-this.heightPerWidth()} 2 ${2 * this.heightPerWidth()}`);
+  protected readonly actionArea = computed(() => centredBox(this.heightPerWidth(), SAFE_ACTION));
+  protected readonly titleArea = computed(() => centredBox(this.heightPerWidth(), SAFE_TITLE));
+  protected readonly thirdsBox = computed(() => centredBox(this.heightPerWidth(), 1 / 3));
+  protected readonly levelLine = computed(() => levelLinePath(this.session.pose()));
+  protected readonly seam = computed(() => {
+    const shot = this.session.shot();
+    if (shot?.seamYaw == null) return '';
+    return seamPath(shot.seamYaw, shot.level ?? [0, 0, 0, 1], this.session.pose());
+  });
+  protected readonly otherFrames = computed(() => {
+    const [first, ...others] = this.session.move().deliverables;
+    return others.map(other => ({ name: other.name, box: deliverableBox(first, other) }));
+  });
+  readonly #moving = computed(() => this.#held() || this.#player.rate() !== 0);
+  /** The widest picture worth loading, pixels; unknown until it is known who draws. */
+  readonly widestPicture = this.#drawn.widestPicture;
 
   constructor() {
-    afterNextRender(() => void this.#start());
-    effect(() => {
-      const picture = this.pictures.sharpest();
-      const renderer = this.#renderer();
-      if (picture && renderer) renderer.setPlate(picture);
-      this.#drawSoon();
-    });
+    afterNextRender(() => this.#start());
     effect(() => {
       this.session.pose();
       this.session.shot();
       this.frame();
+      this.#drawn.turn();
+      this.#moving();
       this.#drawSoon();
     });
-  }
-
-  protected toggleThirds(): void {
-    this.thirds.update(on => writeFlag('thirds', !on));
-  }
-
-  protected toggleLevelLine(): void {
-    this.levelLine.update(on => writeFlag('level-line', !on));
   }
 
   protected setKeyHere(): void {
@@ -125,8 +150,9 @@ export class FramedView {
 
   protected grab(event: PointerEvent): void {
     this.#player.stop();
-    this.canvasElement().nativeElement.setPointerCapture(event.pointerId);
+    this.pictureElement().nativeElement.setPointerCapture(event.pointerId);
     this.#pointers.set(event.pointerId, this.#point(event));
+    this.#held.set(true);
     if (this.#pointers.size === 2) this.#startPinch();
     else this.#grip = { pointer: event.pointerId, world: this.#worldAt(this.#point(event)) };
   }
@@ -145,6 +171,7 @@ export class FramedView {
     this.#pinch = undefined;
     const [rest] = this.#pointers;
     this.#grip = rest ? { pointer: rest[0], world: this.#worldAt(rest[1]) } : undefined;
+    this.#held.set(rest !== undefined);
     if (!rest) this.session.commit();
   }
 
@@ -182,31 +209,21 @@ export class FramedView {
   }
 
   #point(event: PointerEvent): PicturePoint {
-    const { left, top, width, height } = this.canvasElement().nativeElement.getBoundingClientRect();
+    const { left, top, width, height } = this.pictureElement().nativeElement.getBoundingClientRect();
     return {
       x: ((event.clientX - left) / width) * 2 - 1,
       y: (1 - ((event.clientY - top) / height) * 2) * (height / width),
     };
   }
 
-  async #start(): Promise<void> {
+  #start(): void {
+    this.#drawn.start({
+      graphics: this.graphicsCanvas().nativeElement,
+      processor: this.processorCanvas().nativeElement,
+    });
     const box = this.boxElement().nativeElement;
     const observer = new ResizeObserver(() => this.#place.set(box.getBoundingClientRect()));
     observer.observe(box);
-    const canvas = this.canvasElement().nativeElement;
-    // three.js restores its own state; what we must do is draw again.
-    canvas.addEventListener('webglcontextrestored', () => this.#drawSoon());
-    try {
-      const { FramedRenderer } = await import('./renderer');
-      const renderer = new FramedRenderer(canvas);
-      this.#renderer.set(renderer);
-      this.#destroy.onDestroy(() => renderer.dispose());
-    } catch (error) {
-      const reason = error instanceof Error ? error.message : String(error);
-      this.failure.set(
-        `The framed view cannot be drawn: this browser gives no WebGL2 (${reason}). Keys and numbers work as ever.`,
-      );
-    }
     this.#destroy.onDestroy(() => {
       observer.disconnect();
       cancelAnimationFrame(this.#frameRequest);
@@ -221,13 +238,18 @@ export class FramedView {
   }
 
   #draw(): void {
-    const renderer = this.#renderer();
     const { width, height } = this.frame();
-    if (!renderer || !this.pictures.sharpest() || width === 0) return;
+    if (width === 0) return;
     const ratio = window.devicePixelRatio;
-    renderer.setSize(Math.round(width * ratio), Math.round(height * ratio));
-    const level = this.session.shot()?.level ?? [0, 0, 0, 1];
-    renderer.draw(this.session.pose(), level, this.heightPerWidth());
+    const pose = this.session.pose();
+    const view = {
+      orientation: sourceOrientation(new Float64Array(4), this.session.shot()?.level ?? [0, 0, 0, 1], pose),
+      fovRad: pose[4],
+      eye: pose[5],
+      width: Math.round(width * ratio),
+      height: Math.round(height * ratio),
+    };
+    this.#drawn.draw(view, this.#moving());
   }
 }
 
@@ -237,21 +259,4 @@ function onPixel(position: number): number {
 
 function between(a: PicturePoint, b: PicturePoint): { spread: number; tilt: number } {
   return { spread: Math.max(Math.hypot(b.x - a.x, b.y - a.y), 1e-3), tilt: Math.atan2(b.y - a.y, b.x - a.x) };
-}
-
-function readFlag(name: string): boolean {
-  try {
-    return localStorage.getItem(`fairlead.show.${name}`) === 'yes';
-  } catch {
-    return false;
-  }
-}
-
-function writeFlag(name: string, on: boolean): boolean {
-  try {
-    localStorage.setItem(`fairlead.show.${name}`, on ? 'yes' : 'no');
-  } catch {
-    // A browser that keeps nothing: the choice holds for this page.
-  }
-  return on;
 }

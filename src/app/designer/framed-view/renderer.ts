@@ -18,23 +18,22 @@ import {
   WebGLRenderer,
 } from 'three';
 
-import { type Quat } from '#shared/conventions';
 import { radiusAtAngle } from '#shared/projection/general-perspective';
-import { conjugate, multiply } from '#shared/rotation/quaternion';
+import { type View } from '#shared/render/picture';
+import { type Drawer } from './drawer';
 import { FRAGMENT, VERTEX } from './shader';
 
 /**
- * Draws the framed picture by WebGL. It takes values and keeps none of the application's: a plate, a pose, a size.
+ * Draws the framed picture by WebGL. It takes values and keeps none of the application's: a plate, a view.
  *
  * Colours pass through as bytes: the texture is not decoded, the output not encoded, so the file's tones are kept.
  */
-export class FramedRenderer {
+export class FramedRenderer implements Drawer {
   readonly #renderer: WebGLRenderer;
   readonly #scene = new Scene();
   readonly #camera = new OrthographicCamera();
   readonly #texture = new Texture();
   readonly #material: ShaderMaterial;
-  readonly #turned = new Float64Array(4);
   readonly #orientation = new Vector4(0, 0, 0, 1);
   readonly #halfSize = new Vector2(1, 1);
 
@@ -78,35 +77,23 @@ export class FramedRenderer {
     this.#scene.add(mesh);
   }
 
-  /** The widest picture that the graphics card takes, pixels. */
-  get largestTexture(): number {
+  get largestPicture(): number {
     return this.#renderer.capabilities.maxTextureSize;
   }
 
-  /** @param picture equirectangular; it stays the caller's to close */
-  setPlate(picture: ImageBitmap): void {
+  async setPlate(picture: ImageBitmap): Promise<void> {
     this.#texture.dispose();
     this.#texture.image = picture;
     this.#texture.needsUpdate = true;
     this.#material.uniforms['texelsPerRadian'].value = picture.width / (2 * Math.PI);
   }
 
-  /** @param width, height device pixels */
-  setSize(width: number, height: number): void {
+  draw({ orientation, fovRad, eye, width, height }: View): void {
     this.#renderer.setSize(width, height, false);
-  }
-
-  /**
-   * @param pose qx, qy, qz, qw in the levelled world, field of view in radians, eye point
-   * @param level source direction → levelled world
-   * @param heightPerWidth of the frame
-   */
-  draw(pose: Readonly<Float64Array>, level: Readonly<Quat>, heightPerWidth: number): void {
-    multiply(this.#turned, conjugate(this.#turned, level), pose);
-    this.#orientation.fromArray(this.#turned);
-    const halfWidth = radiusAtAngle(pose[4] / 2, pose[5]);
-    this.#halfSize.set(halfWidth, halfWidth * heightPerWidth);
-    this.#material.uniforms['eye'].value = pose[5];
+    this.#orientation.fromArray(orientation);
+    const halfWidth = radiusAtAngle(fovRad / 2, eye);
+    this.#halfSize.set(halfWidth, (halfWidth * height) / width);
+    this.#material.uniforms['eye'].value = eye;
     this.#renderer.render(this.#scene, this.#camera);
   }
 
