@@ -1,6 +1,6 @@
-import { UnknownDeliverable } from '#shared/export/frames-table';
 import { oneLine, ReaderGone } from './output';
 import { UsageError } from './usage';
+import { UnknownDeliverable } from '#shared/document/deliverable-named';
 
 type Verb = (args: readonly string[]) => number | Promise<number>;
 

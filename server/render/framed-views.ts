@@ -1,6 +1,6 @@
 import { type MoveDocument } from '#schemas/move';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { halfWidthRatio, matchedFovRad } from '#shared/projection/deliverable-framing';
-import { deliverableNamed } from '#shared/export/frames-table';
 import { compileMove } from '#shared/path/compile';
 import { POSE_SIZE } from '#shared/path/compiled-move';
 import { sourceOrientation } from '#shared/render/camera';

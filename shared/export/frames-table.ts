@@ -1,5 +1,6 @@
-import { type Deliverable, type MoveDocument } from '#schemas/move';
+import { type MoveDocument } from '#schemas/move';
 import { DEG_PER_RAD } from '#shared/conventions';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { shotTimes } from '#shared/document/shot-times';
 import { compileMove } from '#shared/path/compile';
 import { POSE_SIZE } from '#shared/path/compiled-move';
@@ -51,25 +52,6 @@ export const FRAME_COLUMNS = [
   'qz',
   'qw',
 ] as const satisfies readonly (keyof FrameRow)[];
-
-/** Thrown where a deliverable is asked for by a name that the document does not have. */
-export class UnknownDeliverable extends Error {
-  constructor(name: string, document: MoveDocument) {
-    const names = document.deliverables.map(each => JSON.stringify(each.name)).join(', ');
-    super(`The move has no deliverable ${JSON.stringify(name)}; it has ${names}.`);
-  }
-}
-
-/**
- * @param name a deliverable's name; the first unless said
- * @throws UnknownDeliverable
- */
-export function deliverableNamed(document: MoveDocument, name?: string): Deliverable {
-  const found =
-    name === undefined ? document.deliverables[0] : document.deliverables.find(each => each.name === name);
-  if (!found) throw new UnknownDeliverable(name ?? '', document);
-  return found;
-}
 
 /**
  * The frames table of a valid document, row by row, so that a long one need not stand in memory.

@@ -1,9 +1,10 @@
 import { type MoveDocument } from '#schemas/move';
 import { RAD_PER_DEG } from '#shared/conventions';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { shotTimes } from '#shared/document/shot-times';
 import { radiusAtAngle } from '#shared/projection/general-perspective';
 import { deliveredFrameCount } from '#shared/time/delivered-time';
-import { deliverableNamed, frameRows } from './frames-table';
+import { frameRows } from './frames-table';
 
 /**
  * Most delivered frames that a glTF camera is written for: two days at 24 a second.

@@ -1,8 +1,8 @@
 import { type MoveDocument } from '#schemas/move';
-import { deliverableNamed } from './frames-table';
 import { GltfBuffer } from './gltf-buffer';
 import { exactTurning } from './gltf-exact';
 import { type Film, filmOf } from './gltf-film';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 
 /** A camera that shows directions alone has nothing near it; glTF wants a plane in front of it all the same. */
 const ZNEAR = 0.1;

@@ -1,12 +1,12 @@
 import { type Key, type MoveDocument } from '#schemas/move';
 import { DEG_PER_RAD, RAD_PER_DEG } from '#shared/conventions';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { decimalText } from '#shared/document/number-text';
 import { shotTimes } from '#shared/document/shot-times';
 import { halfWidthRatio, matchedFovRad } from '#shared/projection/deliverable-framing';
 import { deliveredFrameCount, deliveredOfSourceFrame, deliveredSeconds } from '#shared/time/delivered-time';
 import { framesPerSecond } from '#shared/time/frame-rate';
 import { framesPerDay, timecodeFromFrame } from '#shared/time/timecode';
-import { deliverableNamed } from './frames-table';
 import * as otio from './otio-objects';
 
 /** A key as the timeline tells it: where it stands in source and film, and its numbers for the deliverable. */

@@ -1,5 +1,6 @@
 import { type Key, type MoveDocument } from '#schemas/move';
 import { DEG_PER_RAD } from '#shared/conventions';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { shotTimes } from '#shared/document/shot-times';
 import { compileMove } from '#shared/path/compile';
 import { POSE_SIZE } from '#shared/path/compiled-move';
@@ -7,7 +8,6 @@ import { halfWidthRatio, matchedFovRad } from '#shared/projection/deliverable-fr
 import { sourceOrientation } from '#shared/render/camera';
 import { yawPitchRollFromQuat } from '#shared/rotation/yaw-pitch-roll';
 import { deliveredFrameCount, sourceFrameOfDelivered } from '#shared/time/delivered-time';
-import { deliverableNamed } from './frames-table';
 
 /** Thrown where FFmpeg's v360 cannot draw a move; the message says what to change. */
 export class NotForFfmpeg extends Error {}

@@ -1,5 +1,5 @@
 import { type MoveDocument } from '#schemas/move';
-import { deliverableNamed } from '#shared/export/frames-table';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { compileMove } from '#shared/path/compile';
 import { DEFAULT_LIMITS, type Limits } from './limits';
 import { eachMeasure, type MeasureColumns, type MeasureName } from './measures';

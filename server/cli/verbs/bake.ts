@@ -1,6 +1,7 @@
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { framesCsv } from '#shared/export/csv';
 import { framesJson } from '#shared/export/frames-json';
-import { deliverableNamed, frameRows } from '#shared/export/frames-table';
+import { frameRows } from '#shared/export/frames-table';
 import { print } from '../output';
 import { readMove } from '../read-document';
 import { choice, readWords } from '../usage';

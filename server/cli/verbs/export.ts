@@ -2,9 +2,10 @@ import { mkdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 
 import { type MoveDocument } from '#schemas/move';
+import { deliverableNamed } from '#shared/document/deliverable-named';
 import { framesCsv } from '#shared/export/csv';
 import { ffmpegScript } from '#shared/export/ffmpeg-script';
-import { deliverableNamed, frameRows } from '#shared/export/frames-table';
+import { frameRows } from '#shared/export/frames-table';
 import { cameraGltf } from '#shared/export/gltf';
 import { FilmTooLong } from '#shared/export/gltf-film';
 import { timelineOtio } from '#shared/export/otio';

@@ -2,9 +2,10 @@ import { parse } from 'csv-parse/sync';
 import { Euler, MathUtils, Quaternion } from 'three';
 
 import { type MoveDocument } from '#schemas/move';
+import { UnknownDeliverable } from '#shared/document/deliverable-named';
 import { framesCsv } from '#shared/export/csv';
 import { framesJson } from '#shared/export/frames-json';
-import { FRAME_COLUMNS, frameRows, type Per, UnknownDeliverable } from '#shared/export/frames-table';
+import { FRAME_COLUMNS, frameRows, type Per } from '#shared/export/frames-table';
 import { fullMove, quayMove } from '../../support/documents';
 import { joined, key, moveWith } from '../../support/moves';
 

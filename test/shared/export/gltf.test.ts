@@ -2,8 +2,8 @@ import { validateString } from 'gltf-validator';
 import { Euler, MathUtils, Quaternion, QuaternionLinearInterpolant } from 'three';
 
 import { type Ease, type Key, type MoveDocument } from '#schemas/move';
+import { UnknownDeliverable } from '#shared/document/deliverable-named';
 import { base64FromBytes } from '#shared/export/base64-text';
-import { UnknownDeliverable } from '#shared/export/frames-table';
 import { cameraGltf } from '#shared/export/gltf';
 import { FilmTooLong, MOST_GLTF_FRAMES } from '#shared/export/gltf-film';
 import { compileMove } from '#shared/path/compile';

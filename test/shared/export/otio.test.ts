@@ -2,7 +2,7 @@ import Timecode from 'smpte-timecode';
 import { MathUtils } from 'three';
 
 import { type MoveDocument } from '#schemas/move';
-import { UnknownDeliverable } from '#shared/export/frames-table';
+import { UnknownDeliverable } from '#shared/document/deliverable-named';
 import { timelineOtio } from '#shared/export/otio';
 import { changed, fullMove, quayMove } from '../../support/documents';
 import { joined, key, moveWith } from '../../support/moves';
