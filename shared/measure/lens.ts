@@ -1,3 +1,4 @@
+import { directionAtPicture } from '#shared/projection/general-perspective';
 import { sineCosines } from '#shared/rotation/sine-cosines';
 
 /** Places in {@link Lens.numbers}: half sides on the tangent plane, and the eye point. */
@@ -39,39 +40,46 @@ export class Lens {
   }
 }
 
-/** Places in {@link Rectangle.edges}: cosines of the angles from the axis to the nearest side and to a corner. */
-export const INNER = 0;
-export const OUTER = 1;
+/** Where a circle about the frame's centre lies: inside the rectangle, outside it, or across its sides. */
+export const INSIDE = 1;
+export const OUTSIDE = -1;
+export const ACROSS = 0;
 
 /**
  * A rectangle on the tangent plane about the frame's centre, as a set of directions: what of a circle on the sphere
  * shows in it. Lines on the plane are circles on the sphere, so nothing here is sampled.
  */
 export class Rectangle {
-  /** See the places above. */
-  readonly edges = new Float64Array(2);
   readonly #numbers = new Float64Array(3);
   readonly #corner = new Float64Array(3);
 
   /** @param share of the frame's width that it has; all of its height */
   set(lens: Lens, share: number): void {
     const numbers = this.#numbers;
-    const corner = this.#corner;
-    const edges = this.edges;
-    const eye = lens.numbers[EYE];
-    const x = lens.numbers[HALF_WIDTH] * share;
-    const y = lens.numbers[HALF_HEIGHT];
-    numbers[HALF_WIDTH] = x;
-    numbers[HALF_HEIGHT] = y;
-    numbers[EYE] = eye;
-    const nearest = x < y ? x : y;
-    const side = rayLength(nearest * nearest, eye);
-    edges[INNER] = side * (1 + eye) - eye;
-    const t = rayLength(x * x + y * y, eye);
-    corner[0] = t * x;
-    corner[1] = t * y;
-    corner[2] = eye - t * (1 + eye);
-    edges[OUTER] = -corner[2];
+    numbers[HALF_WIDTH] = lens.numbers[HALF_WIDTH] * share;
+    numbers[HALF_HEIGHT] = lens.numbers[HALF_HEIGHT];
+    numbers[EYE] = lens.numbers[EYE];
+  }
+
+  /**
+   * Where directions of one angle from the axis lie. Their radius on the plane, (1 + d) sin c / (d + cos c), is compared
+   * in squares and without a quotient: this is asked of every frame.
+   *
+   * @param cosine of the angle
+   * @returns INSIDE, OUTSIDE or ACROSS
+   */
+  placeOf(cosine: number): number {
+    const numbers = this.#numbers;
+    const x = numbers[HALF_WIDTH];
+    const y = numbers[HALF_HEIGHT];
+    const a = 1 + numbers[EYE];
+    const depth = numbers[EYE] + cosine;
+    if (depth <= 0) return OUTSIDE;
+    const far = a * a * (1 - cosine * cosine);
+    const near = depth * depth;
+    const least = x < y ? x : y;
+    if (far <= least * least * near) return INSIDE;
+    return far > (x * x + y * y) * near ? OUTSIDE : ACROSS;
   }
 
   /** Whether a camera direction shows. */
@@ -91,6 +99,8 @@ export class Rectangle {
    * @returns how many of the four have `axis · corner ≥ height`
    */
   cornersBeyond(x: number, y: number, z: number, height: number): number {
+    const numbers = this.#numbers;
+    directionAtPicture(this.#corner, numbers[HALF_WIDTH], numbers[HALF_HEIGHT], numbers[EYE]);
     const cx = this.#corner[0] * x;
     const cy = this.#corner[1] * y;
     const rest = this.#corner[2] * z - height;
@@ -151,10 +161,4 @@ export class Rectangle {
 function onSide(along: number, depth: number, eye: number, reach: number): boolean {
   const room = eye - depth;
   return room > 0 && Math.abs(along) * (1 + eye) <= reach * room;
-}
-
-/** What a point of the tangent plane, that far squared from its centre, is multiplied by to fall on the sphere. */
-function rayLength(squared: number, eye: number): number {
-  const a = 1 + eye;
-  return (eye * a + Math.sqrt(a * a + squared * (1 - eye * eye))) / (squared + a * a);
 }

@@ -1,6 +1,6 @@
 import { type Quat, RAD_PER_DEG, type Vec3 } from '#shared/conventions';
 import { conjugate, rotate } from '#shared/rotation/quaternion';
-import { INNER, type Lens, OUTER, Rectangle } from './lens';
+import { ACROSS, INSIDE, type Lens, Rectangle } from './lens';
 
 /** What shows the tripod: this far about the source's nadir. */
 const TRIPOD_RAD = 20 * RAD_PER_DEG;
@@ -40,12 +40,12 @@ export class SeamView implements InView {
   isSeen(orientation: Readonly<Quat>, forward: Readonly<Vec3>): boolean {
     const normal = this.#normal;
     const z = -(normal[0] * forward[0] + normal[1] * forward[1] + normal[2] * forward[2]);
-    // The seam passes the axis at an angle whose sine is |z|.
-    const inner = this.#third.edges[INNER];
-    const outer = this.#third.edges[OUTER];
-    if (inner <= 0 || z * z <= 1 - inner * inner) return true;
-    if (outer > 0 && z * z > 1 - outer * outer) return false;
-    const [x, y] = rotate(this.#seen, conjugate(this.#inverse, orientation), normal);
+    // It comes nearest to the axis at an angle whose sine is |z|.
+    const place = this.#third.placeOf(Math.sqrt(1 - z * z));
+    if (place !== ACROSS) return place === INSIDE;
+    const seen = rotate(this.#seen, conjugate(this.#inverse, orientation), normal);
+    const x = seen[0];
+    const y = seen[1];
     const beyond = this.#third.cornersBeyond(x, y, z, 0);
     const centreBeyond = z <= 0;
     // Nothing but the seam parts the corners from each other, or all of them from the centre.
@@ -75,11 +75,12 @@ export class TripodView implements InView {
     const z = -(nadir[0] * forward[0] + nadir[1] * forward[1] + nadir[2] * forward[2]);
     const frame = this.#frame;
     if (-z >= TRIPOD_COSINE) return true;
-    // Cosine of the angle from the axis to the cone.
-    const cone = Math.sqrt(1 - z * z) * TRIPOD_SINE - z * TRIPOD_COSINE;
-    if (cone >= frame.edges[INNER]) return true;
-    if (cone < frame.edges[OUTER]) return false;
-    const [x, y] = rotate(this.#seen, conjugate(this.#inverse, orientation), nadir);
+    // Of the cone that is nearest to the axis which lies straight towards it.
+    const place = frame.placeOf(Math.sqrt(1 - z * z) * TRIPOD_SINE - z * TRIPOD_COSINE);
+    if (place !== ACROSS) return place === INSIDE;
+    const seen = rotate(this.#seen, conjugate(this.#inverse, orientation), nadir);
+    const x = seen[0];
+    const y = seen[1];
     return (
       frame.holds(x, y, z) ||
       frame.cornersBeyond(x, y, z, TRIPOD_COSINE) > 0 ||

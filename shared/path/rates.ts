@@ -46,7 +46,9 @@ export class Rates {
   /** Scratch: an ease's slopes, a quaternion, a rotation vector and its derivatives. */
   readonly #slopes = new Float64Array(2);
   readonly #quat = new Float64Array(4);
-  readonly #vector = [new Float64Array(3), new Float64Array(3), new Float64Array(3)] as const;
+  readonly #vector = new Float64Array(3);
+  readonly #vector1 = new Float64Array(3);
+  readonly #vector2 = new Float64Array(3);
 
   constructor(move: CompiledMove) {
     this.#move = move;
@@ -138,7 +140,11 @@ export class Rates {
       this.#channel(this.#roll, table, row + at.ROLL_TURN_CUBIC);
     }
     orientationOnLeg(this.#quat, table, row, sort, flags & ~at.TURNS, this.#progress);
-    const [x, y, z, w] = this.#quat;
+    const q = this.#quat;
+    const x = q[0];
+    const y = q[1];
+    const z = q[2];
+    const w = q[3];
     this.#up[0] = 2 * (x * y + w * z);
     this.#up[1] = 1 - 2 * (x * x + z * z);
     this.#up[2] = 2 * (y * z - w * x);
@@ -166,7 +172,9 @@ export class Rates {
   #splineRates(table: Readonly<Float64Array>, row: number): void {
     const t = this.#progress[0];
     const perFrame = this.#progress[1];
-    const [r, r1, r2] = this.#vector;
+    const r = this.#vector;
+    const r1 = this.#vector1;
+    const r2 = this.#vector2;
     for (let k = 0; k < 3; k++) {
       const c1 = table[row + at.VECTOR + k];
       const c2 = table[row + at.VECTOR + 3 + k];
