@@ -58,6 +58,7 @@ test('the level line lies on the horizon, and what is shown is remembered', asyn
     'Safe title area',
     'Seam',
     'Other deliverables',
+    'Surround, masked',
   ])
     await expect(page.getByRole('menuitemcheckbox', { name })).toHaveAttribute('aria-checked', 'false');
 });

@@ -16,6 +16,7 @@ import { MatIconModule } from '@angular/material/icon';
 import { MatMenuModule } from '@angular/material/menu';
 import { MatTooltipModule } from '@angular/material/tooltip';
 
+import { matchedFovRad } from '#shared/projection/deliverable-framing';
 import { sourceOrientation } from '#shared/render/camera';
 import { PlatePictures } from '../plate-pictures';
 import { DesignerSession } from '../session/designer-session';
@@ -33,6 +34,7 @@ import {
   SAFE_ACTION,
   SAFE_TITLE,
   seamPath,
+  thirdsPath,
 } from './overlays';
 import { ShownOverlays } from './shown-overlays';
 
@@ -41,6 +43,9 @@ const ZOOM_PER_PIXEL = 1.0015;
 
 /** How long after the last turn of the wheel a zoom of a key counts as done. */
 const WHEEL_ENDS_MS = 250;
+
+/** With its surround the frame is shown this much smaller, and as much more is drawn about it. */
+const SURROUND = 1.35;
 
 /** Who draws, as the menu names them. */
 const WAYS: readonly { readonly way: Way; readonly label: string }[] = [
@@ -77,6 +82,7 @@ export class FramedView {
   readonly #player = inject(Player);
   readonly #destroy = inject(DestroyRef);
   protected readonly pictureElement = viewChild.required<ElementRef<HTMLElement>>('picture');
+  protected readonly frameElement = viewChild.required<ElementRef<HTMLElement>>('frameBox');
   protected readonly graphicsCanvas = viewChild.required<ElementRef<HTMLCanvasElement>>('graphicsCanvas');
   protected readonly processorCanvas = viewChild.required<ElementRef<HTMLCanvasElement>>('processorCanvas');
   protected readonly boxElement = viewChild.required<ElementRef<HTMLElement>>('box');
@@ -98,10 +104,12 @@ export class FramedView {
     const [first] = this.session.move().deliverables;
     return first.height / first.width;
   });
-  /** The largest frame of the deliverable's shape that fits, CSS pixels. */
+  /** How much more than the frame is drawn, each way, of its width and its height. */
+  readonly #reach = computed(() => (this.overlays.has('surround') ? SURROUND : 1));
+  /** The largest frame of the deliverable's shape that fits with its surround, CSS pixels. */
   protected readonly frame = computed(() => {
     const place = this.#place();
-    const width = Math.floor(Math.min(place.width, place.height / this.heightPerWidth()));
+    const width = Math.floor(Math.min(place.width, place.height / this.heightPerWidth()) / this.#reach());
     const height = Math.round(width * this.heightPerWidth());
     // On whole pixels of the screen: half a pixel aside the browser would blur the picture.
     const left = onPixel(place.left + (place.width - width) / 2) - place.left;
@@ -111,7 +119,7 @@ export class FramedView {
   protected readonly viewBox = computed(() => `-1 ${-this.heightPerWidth()} 2 ${2 * this.heightPerWidth()}`);
   protected readonly actionArea = computed(() => centredBox(this.heightPerWidth(), SAFE_ACTION));
   protected readonly titleArea = computed(() => centredBox(this.heightPerWidth(), SAFE_TITLE));
-  protected readonly thirdsBox = computed(() => centredBox(this.heightPerWidth(), 1 / 3));
+  protected readonly thirds = computed(() => thirdsPath(this.heightPerWidth()));
   protected readonly levelLine = computed(() => levelLinePath(this.session.pose()));
   protected readonly seam = computed(() => {
     const shot = this.session.shot();
@@ -121,6 +129,12 @@ export class FramedView {
   protected readonly otherFrames = computed(() => {
     const [first, ...others] = this.session.move().deliverables;
     return others.map(other => ({ name: other.name, box: deliverableBox(first, other) }));
+  });
+  /** What is drawn, about the frame: the frame itself, or with its surround. */
+  protected readonly drawnBox = computed(() => {
+    const { width, height } = this.frame();
+    const [aside, above] = [width, height].map(side => Math.round((side * (this.#reach() - 1)) / 2));
+    return { left: -aside, top: -above, width: width + 2 * aside, height: height + 2 * above };
   });
   readonly #moving = computed(() => this.#held() || this.#player.rate() !== 0);
   /** The widest picture worth loading, pixels; unknown until it is known who draws. */
@@ -209,7 +223,7 @@ export class FramedView {
   }
 
   #point(event: PointerEvent): PicturePoint {
-    const { left, top, width, height } = this.pictureElement().nativeElement.getBoundingClientRect();
+    const { left, top, width, height } = this.frameElement().nativeElement.getBoundingClientRect();
     return {
       x: ((event.clientX - left) / width) * 2 - 1,
       y: (1 - ((event.clientY - top) / height) * 2) * (height / width),
@@ -238,13 +252,13 @@ export class FramedView {
   }
 
   #draw(): void {
-    const { width, height } = this.frame();
+    const { width, height } = this.drawnBox();
     if (width === 0) return;
     const ratio = window.devicePixelRatio;
     const pose = this.session.pose();
     const view = {
       orientation: sourceOrientation(new Float64Array(4), this.session.shot()?.level ?? [0, 0, 0, 1], pose),
-      fovRad: pose[4],
+      fovRad: matchedFovRad(pose[4], pose[5], width / this.frame().width),
       eye: pose[5],
       width: Math.round(width * ratio),
       height: Math.round(height * ratio),

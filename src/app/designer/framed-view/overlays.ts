@@ -18,6 +18,7 @@ export const OVERLAYS = [
   { name: 'level-line', label: 'Level line' },
   { name: 'seam', label: 'Seam' },
   { name: 'other-frames', label: 'Other deliverables' },
+  { name: 'surround', label: 'Surround, masked' },
 ] as const;
 
 export type OverlayName = (typeof OVERLAYS)[number]['name'];
@@ -47,6 +48,12 @@ export function centredBox(heightPerWidth: number, acrossShare: number, downShar
     width: 2 * acrossShare,
     height: 2 * downShare * heightPerWidth,
   };
+}
+
+/** Two lines across and two down, a third of the frame apart. */
+export function thirdsPath(heightPerWidth: number): string {
+  const h = heightPerWidth;
+  return `M${-1 / 3} ${-h}V${h}M${1 / 3} ${-h}V${h}M-1 ${-h / 3}H1M-1 ${h / 3}H1`;
 }
 
 /** Another deliverable's frame, where it lies in the first's: it may reach beyond it. */
