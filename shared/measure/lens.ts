@@ -24,19 +24,17 @@ export class Lens {
 
   /**
    * @param pose holds the first deliverable's horizontal field of view and the eye point, as `poseAt` leaves them
-   * @returns whether anything changed
    */
-  set(pose: Readonly<Float64Array>): boolean {
+  set(pose: Readonly<Float64Array>): void {
     const numbers = this.numbers;
     const eye = pose[5];
-    if (pose[4] === 2 * this.#angle[0] && eye === numbers[EYE]) return false;
+    if (pose[4] === 2 * this.#angle[0] && eye === numbers[EYE]) return;
     this.#angle[0] = pose[4] / 2;
     sineCosines(this.#turn, this.#angle, 1);
     const halfWidth = (this.ratio * (1 + eye) * this.#turn[0]) / (eye + this.#turn[1]);
     numbers[HALF_WIDTH] = halfWidth;
     numbers[HALF_HEIGHT] = halfWidth * this.heightPerWidth;
     numbers[EYE] = eye;
-    return true;
   }
 }
 
@@ -50,15 +48,14 @@ export const ACROSS = 0;
  * shows in it. Lines on the plane are circles on the sphere, so nothing here is sampled.
  */
 export class Rectangle {
-  readonly #numbers = new Float64Array(3);
+  readonly #numbers: Readonly<Float64Array>;
+  readonly #share: number;
   readonly #corner = new Float64Array(3);
 
-  /** @param share of the frame's width that it has; all of its height */
-  set(lens: Lens, share: number): void {
-    const numbers = this.#numbers;
-    numbers[HALF_WIDTH] = lens.numbers[HALF_WIDTH] * share;
-    numbers[HALF_HEIGHT] = lens.numbers[HALF_HEIGHT];
-    numbers[EYE] = lens.numbers[EYE];
+  /** @param share of the frame's width that it has; all of its height. It follows the lens */
+  constructor(lens: Lens, share: number) {
+    this.#numbers = lens.numbers;
+    this.#share = share;
   }
 
   /**
@@ -70,7 +67,7 @@ export class Rectangle {
    */
   placeOf(cosine: number): number {
     const numbers = this.#numbers;
-    const x = numbers[HALF_WIDTH];
+    const x = numbers[HALF_WIDTH] * this.#share;
     const y = numbers[HALF_HEIGHT];
     const a = 1 + numbers[EYE];
     const depth = numbers[EYE] + cosine;
@@ -89,7 +86,8 @@ export class Rectangle {
     if (depth <= 0) return false;
     const scale = (1 + eye) / depth;
     return (
-      Math.abs(x) * scale <= this.#numbers[HALF_WIDTH] && Math.abs(y) * scale <= this.#numbers[HALF_HEIGHT]
+      Math.abs(x) * scale <= this.#numbers[HALF_WIDTH] * this.#share &&
+      Math.abs(y) * scale <= this.#numbers[HALF_HEIGHT]
     );
   }
 
@@ -100,7 +98,7 @@ export class Rectangle {
    */
   cornersBeyond(x: number, y: number, z: number, height: number): number {
     const numbers = this.#numbers;
-    directionAtPicture(this.#corner, numbers[HALF_WIDTH], numbers[HALF_HEIGHT], numbers[EYE]);
+    directionAtPicture(this.#corner, numbers[HALF_WIDTH] * this.#share, numbers[HALF_HEIGHT], numbers[EYE]);
     const cx = this.#corner[0] * x;
     const cy = this.#corner[1] * y;
     const rest = this.#corner[2] * z - height;
@@ -119,7 +117,7 @@ export class Rectangle {
    * where the side stands; so the crossings are where two planes and the sphere meet.
    */
   isCrossedBy(x: number, y: number, z: number, height: number): boolean {
-    const right = this.#numbers[HALF_WIDTH];
+    const right = this.#numbers[HALF_WIDTH] * this.#share;
     const top = this.#numbers[HALF_HEIGHT];
     return (
       this.#sideCrossed(x, y, z, height, right, top) ||

@@ -34,10 +34,10 @@ export class MeasureTaker {
   /** Degrees a delivered second, per radian a source frame; and the same of accelerations. */
   readonly #rateFactor: number;
   readonly #accelerationFactor: number;
-  readonly #framesPerSecond: number;
-  readonly #widthPx: number;
-  /** Source pixels per radian, at the picture's equator. */
-  readonly #sourcePxPerRad: number;
+  /** Picture pixels a frame, per degree a second and by the frame's width on the tangent plane. */
+  readonly #stepFactor: number;
+  /** Source pixels per picture pixel, per width on the tangent plane. */
+  readonly #sharpnessFactor: number;
   readonly #pose = new Float64Array(POSE_SIZE);
   readonly #forward = new Float64Array(3);
   readonly #rate = new Float64Array(RATES_SIZE);
@@ -59,13 +59,13 @@ export class MeasureTaker {
       halfWidthRatio(deliverables[0], deliverable),
       deliverable.height / deliverable.width,
     );
-    this.#seam = shot.seamYaw === undefined ? undefined : new SeamView(shot.seamYaw * RAD_PER_DEG, level);
-    this.#tripod = new TripodView(level);
+    this.#seam =
+      shot.seamYaw === undefined ? undefined : new SeamView(shot.seamYaw * RAD_PER_DEG, level, this.#lens);
+    this.#tripod = new TripodView(level, this.#lens);
     this.#rateFactor = perSecond * DEG_PER_RAD;
     this.#accelerationFactor = perSecond * perSecond * DEG_PER_RAD;
-    this.#framesPerSecond = framesPerSecond(times.rate);
-    this.#widthPx = deliverable.width;
-    this.#sourcePxPerRad = shot.source.width / (2 * Math.PI);
+    this.#stepFactor = (RAD_PER_DEG * deliverable.width) / framesPerSecond(times.rate);
+    this.#sharpnessFactor = shot.source.width / (2 * Math.PI * deliverable.width);
   }
 
   /** All frames, and what is measured at keys and of the whole. */
@@ -89,20 +89,17 @@ export class MeasureTaker {
     const sourceFrame = sourceFrameOfDelivered(this.times, frame);
     this.#move.poseAt(pose, sourceFrame);
     this.#rates.at(rate, sourceFrame);
-    if (lens.set(pose)) {
-      this.#tripod.setLens(lens);
-      this.#seam?.setLens(lens);
-    }
+    lens.set(pose);
     const across = Math.sqrt(rate[0] * rate[0] + rate[1] * rate[1]) * this.#rateFactor;
     const width = 2 * lens.numbers[HALF_WIDTH];
     columns.panRateDegPerSec[frame] = across;
     columns.crossingTimeSec[frame] = across > 0 ? (width * DEG_PER_RAD) / across : NaN;
-    columns.stepPx[frame] = (across * RAD_PER_DEG * this.#widthPx) / (this.#framesPerSecond * width);
+    columns.stepPx[frame] = (across * this.#stepFactor) / width;
     columns.rollRateDegPerSec[frame] = Math.abs(rate[2]) * this.#rateFactor;
     columns.zoomRatePerSec[frame] = Math.abs(rate[6]) * this.#rateFactor * DOUBLINGS;
     columns.accelerationDegPerSec2[frame] =
       Math.sqrt(rate[3] * rate[3] + rate[4] * rate[4] + rate[5] * rate[5]) * this.#accelerationFactor;
-    columns.sharpness[frame] = (this.#sourcePxPerRad * width) / this.#widthPx;
+    columns.sharpness[frame] = width * this.#sharpnessFactor;
     columns.horizonLeanDeg[frame] = leanDeg(pose);
     const forward = this.#forward;
     forward[0] = -2 * (pose[0] * pose[2] + pose[3] * pose[1]);
@@ -155,5 +152,6 @@ function leanDeg(q: Readonly<Float64Array>): number {
   const rightY = 2 * (q[0] * q[1] + q[2] * q[3]);
   const upY = 1 - 2 * (q[0] * q[0] + q[2] * q[2]);
   if (rightY * rightY + upY * upY < POLE_SINE * POLE_SINE) return NaN;
-  return Math.atan2(rightY, upY) * DEG_PER_RAD;
+  // Upright, as nearly all frames are, the plain arc tangent is the same and sooner done.
+  return (upY > 0 ? Math.atan(rightY / upY) : Math.atan2(rightY, upY)) * DEG_PER_RAD;
 }

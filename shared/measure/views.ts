@@ -9,8 +9,6 @@ const TRIPOD_SINE = Math.sin(TRIPOD_RAD);
 
 /** Something in the source that a frame shows or does not. */
 export interface InView {
-  /** Must be told whenever the lens has changed. */
-  setLens(lens: Lens): void;
   /**
    * @param orientation camera → world
    * @param forward where the camera looks, in the world: it decides most frames without turning anything
@@ -26,15 +24,15 @@ export class SeamView implements InView {
   readonly #normal = new Float64Array(3);
   readonly #seen = new Float64Array(3);
   readonly #inverse = new Float64Array(4);
-  readonly #third = new Rectangle();
+  readonly #third: Rectangle;
 
-  /** @param level the shot's rotation, source direction → levelled world */
-  constructor(seamYawRad: number, level: Readonly<Quat>) {
+  /**
+   * @param level the shot's rotation, source direction → levelled world
+   * @param lens the frame's, which is followed
+   */
+  constructor(seamYawRad: number, level: Readonly<Quat>, lens: Lens) {
+    this.#third = new Rectangle(lens, 1 / 3);
     rotate(this.#normal, level, [Math.cos(seamYawRad), 0, Math.sin(seamYawRad)]);
-  }
-
-  setLens(lens: Lens): void {
-    this.#third.set(lens, 1 / 3);
   }
 
   isSeen(orientation: Readonly<Quat>, forward: Readonly<Vec3>): boolean {
@@ -59,15 +57,15 @@ export class TripodView implements InView {
   readonly #nadir = new Float64Array(3);
   readonly #seen = new Float64Array(3);
   readonly #inverse = new Float64Array(4);
-  readonly #frame = new Rectangle();
+  readonly #frame: Rectangle;
 
-  /** @param level the shot's rotation, source direction → levelled world */
-  constructor(level: Readonly<Quat>) {
+  /**
+   * @param level the shot's rotation, source direction → levelled world
+   * @param lens the frame's, which is followed
+   */
+  constructor(level: Readonly<Quat>, lens: Lens) {
+    this.#frame = new Rectangle(lens, 1);
     rotate(this.#nadir, level, [0, -1, 0]);
-  }
-
-  setLens(lens: Lens): void {
-    this.#frame.set(lens, 1);
   }
 
   isSeen(orientation: Readonly<Quat>, forward: Readonly<Vec3>): boolean {
