@@ -1,5 +1,4 @@
 // Made by `npm run generate` from the JSON Schema of the same name. Not to be edited.
-/* eslint-disable */
 // @ts-nocheck: machine-made code; its type is stated at the end.
 import { type SchemaValidator } from './schema-validator';
 import { type MoveDocument } from './move';

@@ -21,8 +21,7 @@ export async function standaloneValidator(file, schemas) {
   });
   const { $id, title } = schemas.get(file);
   const code = await selfContained(standaloneCode(ajv, { machineMade: $id }));
-  return `/* eslint-disable */
-// @ts-nocheck: machine-made code; its type is stated at the end.
+  return `// @ts-nocheck: machine-made code; its type is stated at the end.
 import { type SchemaValidator } from '${'../'.repeat(file.split('/').length - 1) || './'}schema-validator';
 import { type ${title} } from './${path.basename(file, '.schema.json')}';
 
