@@ -19,7 +19,7 @@ const JOLT_LIMIT_DEG_PER_SEC = 2;
 const SHARPNESS_LIMIT = 1;
 
 /** Effective shutter angle under which movement strobes, degrees. Common practice, no source. */
-const SHUTTER_LIMIT_DEG = 90;
+export const SHUTTER_LIMIT_DEG = 90;
 
 export const DEFAULT_LIMITS: Limits = {
   crossingTimeSec: CROSSING_LIMIT_SEC,

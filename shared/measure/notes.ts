@@ -4,10 +4,10 @@ import { DEG_PER_RAD } from '#shared/conventions';
 import { type CompleteShotTimes, shotTimes } from '#shared/document/shot-times';
 import { type CompiledMove, POSE_SIZE } from '#shared/path/compiled-move';
 import { Rates, RATES_SIZE } from '#shared/path/rates';
-import { deliveredOfSourceFrame, sourceFramesPerDeliveredSecond } from '#shared/time/delivered-time';
+import { firstDeliveredFrameFrom, sourceFramesPerDeliveredSecond } from '#shared/time/delivered-time';
 import { framesPerSecond } from '#shared/time/frame-rate';
 import { keyJolts } from './jolts';
-import { CROSSING_LIMIT_RATES } from './limits';
+import { CROSSING_LIMIT_RATES, SHUTTER_LIMIT_DEG } from './limits';
 import { type MeasureName } from './measures';
 import { type Worst } from './worst';
 
@@ -40,7 +40,7 @@ export function notesOf(
 }
 
 function at(times: CompleteShotTimes, sourceFrame: number): { sourceFrame: number; frame: number } {
-  return { sourceFrame, frame: Math.ceil(deliveredOfSourceFrame(times, sourceFrame) - 1e-9) };
+  return { sourceFrame, frame: firstDeliveredFrameFrom(times, sourceFrame) };
 }
 
 function isDelivered({ from, to }: CompleteShotTimes, sourceFrame: number): boolean {
@@ -86,8 +86,8 @@ function shutterNotes({ shot }: MoveDocument, { intervalSec, speed }: CompleteSh
     const text = `An exposure of ${shot.exposure} s does not fit an interval of ${intervalSec} s: the shutter angle could be at most ${rounded(largest)}°.`;
     return [{ kind: 'impossible-shutter', text }];
   }
-  if (angle >= 90) return [];
-  const text = `With an effective shutter angle of ${rounded(angle)}° whatever moves will strobe; under 90° it is seen (common practice).`;
+  if (angle >= SHUTTER_LIMIT_DEG) return [];
+  const text = `With an effective shutter angle of ${rounded(angle)}° whatever moves will strobe; under ${SHUTTER_LIMIT_DEG}° it is seen (common practice).`;
   return [{ kind: 'strobing', text }];
 }
 

@@ -9,6 +9,7 @@ import { angleBetween } from '#shared/rotation/angle-between';
 import { framesPerSecond } from '#shared/time/frame-rate';
 import {
   deliveredFrameCount,
+  firstDeliveredFrameFrom,
   sourceFrameOfDelivered,
   sourceFramesPerDeliveredSecond,
 } from '#shared/time/delivered-time';
@@ -112,10 +113,10 @@ export class MeasureTaker {
   /** A key's jolt stands at the first delivered frame that shows the key, or what comes after it. */
   #takeJolts(): void {
     const column = this.columns.joltDegPerSec.fill(0);
-    const { from, to, speed } = this.times;
+    const { from, to } = this.times;
     for (const { sourceFrame, jump } of keyJolts(this.#move)) {
       if (sourceFrame < from || sourceFrame > to) continue;
-      const frame = Math.min(Math.ceil((sourceFrame - from) / speed - FRAME_SLACK), this.frameCount - 1);
+      const frame = firstDeliveredFrameFrom(this.times, sourceFrame);
       column[frame] = Math.max(column[frame], jump * this.#rateFactor);
     }
   }
@@ -139,9 +140,6 @@ const MAYBE_UNKNOWN = ['shutterAngleDeg', 'seamInView', 'loopGapDeg'] as const;
 
 /** From a rate of ζ in degrees a second to doublings a second. */
 const DOUBLINGS = RAD_PER_DEG / Math.LN2;
-
-/** Noise of decimal speeds, delivered frames. */
-const FRAME_SLACK = 1e-9;
 
 /**
  * How the horizon leans in the picture: minus the roll, which stands in the heights of the camera's right and up.

@@ -34,6 +34,12 @@ export function deliveredOfSourceFrame({ speed, from }: ShotTimes, sourceFrame: 
   return (sourceFrame - from) / speed;
 }
 
+/** @returns the first delivered frame, from 0, that shows a delivered source frame or what comes after it; the last at most */
+export function firstDeliveredFrameFrom(times: ShotTimes, sourceFrame: number): number {
+  const frame = Math.ceil(deliveredOfSourceFrame(times, sourceFrame) - FRAME_SLACK);
+  return Math.min(frame, deliveredFrameCount(times) - 1);
+}
+
 /** @returns delivered seconds, from the film's start, of a source frame */
 export function deliveredSeconds({ rate, speed, from }: ShotTimes, sourceFrame: number): number {
   return ((sourceFrame - from) * rate.den) / (rate.num * speed);

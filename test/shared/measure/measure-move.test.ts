@@ -128,6 +128,14 @@ describe('jolts', () => {
     expect(notes).toContainEqual(expect.objectContaining({ kind: 'cut', sourceFrame: 24, frame: 24 }));
   });
 
+  // Truth: arithmetic: at five times the speed frames 0 and 5 are shown, and frame 7, where the cut is, never.
+  it('at a key that no frame shows any more stand at the last', () => {
+    const keys = [key(0, { leg: { path: 'level', ease: 'hold' } }), key(7, { yaw: 40 })];
+    const { notes, perFrame } = measureMove(shotted(keys, { speed: 5 }));
+    expect(perFrame.panRateDegPerSec).toHaveLength(2);
+    expect(notes).toContainEqual(expect.objectContaining({ kind: 'cut', sourceFrame: 7, frame: 1 }));
+  });
+
   it('are none at fair joints and rests', () => {
     const keys = joined(
       [key(0, { rest: true }), key(40, { yaw: 50, pitch: 20 }), key(100, { yaw: 90, rest: true })],
