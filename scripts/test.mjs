@@ -8,7 +8,7 @@ import { stages, closeStages } from './lib/test-stages.mjs';
 const words = process.argv.slice(2);
 const matchAt = words.indexOf('--match');
 const match = matchAt >= 0 ? words[matchAt + 1] : undefined;
-const wanted = words.filter((word, i) => word in stages && i !== matchAt + 1);
+const wanted = words.filter((word, i) => word in stages && (matchAt < 0 || i !== matchAt + 1));
 
 for (const signal of ['SIGINT', 'SIGTERM']) {
   process.on(signal, () => {
